@@ -43,7 +43,12 @@ export const metals = (
   brass: Pounds,
   steel: Pounds,
   stainless: Pounds = [Math.round(steel[0] * 1.5), Math.round(steel[1] * 1.5)],
-): Parts => ({ copper: pence(copper), brass: pence(brass), steel: pence(steel), stainless: pence(stainless) });
+): Parts => ({
+  copper: pence(copper),
+  brass: pence(brass),
+  steel: pence(steel),
+  stainless: pence(stainless),
+});
 
 export const noParts: Parts = metals([0, 0], [0, 0], [0, 0]);
 
@@ -79,8 +84,12 @@ export const pressurePa = (quantity: string, label: string, max = 6_000_000, min
   measure(quantity, label, 'Pa', [min, max]);
 export const count = (quantity: string, label: string, max: number): MeasurementSpec =>
   measure(quantity, label, 'count', [0, max]);
-export const rate = (quantity: string, label: string, unit: 'kg/h' | 'Pa/min', max: number): MeasurementSpec =>
-  measure(quantity, label, unit, [0, max]);
+export const rate = (
+  quantity: string,
+  label: string,
+  unit: 'kg/h' | 'Pa/min',
+  max: number,
+): MeasurementSpec => measure(quantity, label, unit, [0, max]);
 export const words = (quantity: string, label: string): MeasurementSpec =>
   measure(quantity, label, 'text', [null, null]);
 export const yesNo = (quantity: string, label: string): MeasurementSpec =>
@@ -100,7 +109,10 @@ export const fromSteam = (quantity: string, label: string, unit: MeasureUnit): M
 export const always: AppliesTo = { traits: [], fittings: [], firings: [] };
 export const only = (when: Partial<AppliesTo>): AppliesTo => ({ ...always, ...when });
 
-type Draft = Omit<Criterion, 'id' | 'section' | 'number' | 'safetyCritical' | 'ifNotFitted' | 'measurements'> &
+type Draft = Omit<
+  Criterion,
+  'id' | 'section' | 'number' | 'safetyCritical' | 'ifNotFitted' | 'measurements'
+> &
   Partial<Pick<Criterion, 'safetyCritical' | 'ifNotFitted' | 'measurements'>>;
 
 /** A section's criteria from its data: ids are `section.name`, numbers run on from the section before. */
