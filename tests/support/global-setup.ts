@@ -1,0 +1,3 @@
+import { makeTemplate } from './db-template.ts';
+
+export const setup = makeTemplate;
