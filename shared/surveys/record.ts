@@ -179,6 +179,9 @@ export const surveyRecord = z.strictObject({
   instruments: z.array(instrument).max(20, 'At most 20 instruments'),
   hydraulic: hydraulicTest.nullable(),
   steam: steamTest.nullable(),
+  /** Why a test that the scope includes was not made. */
+  noHydraulicReason: shortText(400).default(''),
+  noSteamReason: shortText(400).default(''),
   /** What the surveyor wants to say to the buyer in their own words. */
   summary: shortText(3_000).default(''),
 });
@@ -191,5 +194,7 @@ export const emptyRecord = (rubricVersion: string): SurveyRecord => ({
   instruments: [],
   hydraulic: null,
   steam: null,
+  noHydraulicReason: '',
+  noSteamReason: '',
   summary: '',
 });

@@ -1,0 +1,26 @@
+import {
+  accumulation,
+  carbonMonoxide,
+  gasTightness,
+  gaugePassages,
+  jointMaterial,
+  valveLift,
+  valveReseat,
+} from './checks-steam.ts';
+import { barLitresCheck, secondFeed, waterLevel } from './checks-water.ts';
+import type { Examined, SurveyInput } from './examined.ts';
+import type { EngineeringCheck } from './result.ts';
+
+/** Every engineering check that feeds the verdict or the report, always in this order. */
+export const checksFor = (input: SurveyInput, items: readonly Examined[]): EngineeringCheck[] => [
+  barLitresCheck(input),
+  jointMaterial(items),
+  valveLift(input),
+  accumulation(input),
+  valveReseat(input),
+  gaugePassages(input),
+  waterLevel(items),
+  secondFeed(input, items),
+  gasTightness(input),
+  carbonMonoxide(input),
+];
