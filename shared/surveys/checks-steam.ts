@@ -113,7 +113,7 @@ const softJoints: ReadonlySet<unknown> = new Set(['soft-solder', 'rivets-soft'])
 export function jointMaterial(items: readonly Examined[]): EngineeringCheck {
   const make = check('joint-material', 'What the joints are made with', 'shell.joints');
   const found = valuesOf(items, 'shell.joints', 'jointMaterial');
-  if (found.length === 0 || found.every((value) => value === 'not-known'))
+  if (found.every((value) => value === 'not-known'))
     return make.cannotSay('What the joints are made with is not recorded.');
   return found.some((value) => softJoints.has(value))
     ? make.fail('Soft solder was found in a pressure joint.')

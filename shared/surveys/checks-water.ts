@@ -44,17 +44,11 @@ export function secondFeed({ facts }: SurveyInput, items: readonly Examined[]): 
   const why =
     facts.firing === 'coal' ? 'a coal fire cannot be put out at once' : 'it holds 3 bar·litres or more';
   const figures = [figure('Working pressure times water capacity', Math.round(product * 100) / 100, 'bar·L')];
-  switch (grade) {
-    case 'notFitted':
-      return make.fail(`There is no second means of feed, and one is asked for because ${why}.`, figures);
-    case 'unfit':
-      return make.fail(`The second means of feed is Unfit, and one is asked for because ${why}.`, figures);
-    case 'sound':
-    case 'serviceable':
-    case 'attention':
-      return make.pass('There is a second means of feed.', figures);
-    case 'notExamined':
-    case undefined:
-      return make.cannotSay('The second means of feed was not examined.', figures);
-  }
+  if (grade === 'notFitted')
+    return make.fail(`There is no second means of feed, and one is asked for because ${why}.`, figures);
+  if (grade === 'unfit')
+    return make.fail(`The second means of feed is Unfit, and one is asked for because ${why}.`, figures);
+  if (grade === undefined || grade === 'notExamined')
+    return make.cannotSay('The second means of feed was not examined.', figures);
+  return make.pass('There is a second means of feed.', figures);
 }

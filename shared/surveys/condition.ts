@@ -1,19 +1,10 @@
 import { isExamined, isFitted } from './examined.ts';
 import type { Examined } from './examined.ts';
 import { limits } from './limits.ts';
+import type { Grade } from './record.ts';
 
-const pointsOf = ({ finding }: Examined): number => {
-  switch (finding.grade) {
-    case 'sound':
-    case 'serviceable':
-    case 'attention':
-    case 'unfit':
-      return limits.gradePoints[finding.grade];
-    case 'notExamined':
-    case 'notFitted':
-      return 0;
-  }
-};
+const pointsByGrade: Record<Grade, number> = { ...limits.gradePoints, notExamined: 0, notFitted: 0 };
+const pointsOf = ({ finding }: Examined): number => pointsByGrade[finding.grade];
 
 const weightOf = (items: readonly Examined[]): number =>
   items.reduce((sum, { criterion }) => sum + criterion.weight, 0);

@@ -25,27 +25,18 @@ const listedFitting: Readonly<Record<string, FittingId>> = {
 
 const isPassed = (finding: Finding): boolean => finding.grade === 'sound' || finding.grade === 'serviceable';
 
+/** What is wrong with a value for its quantity, or null. */
 function misfit(spec: MeasurementSpec, value: Measurement['value']): string | null {
-  switch (spec.unit) {
-    case 'text':
-      return typeof value === 'string' ? null : 'is put in words';
-    case 'yes-no':
-      return typeof value === 'boolean' ? null : 'is a yes or a no';
-    case 'choice':
-      return spec.choices.some((choice) => choice.id === value) ? null : 'is one of its list';
-    case 'Pa':
-    case 'Pa/min':
-    case 'mm':
-    case 'ppm':
-    case 'kg/h':
-    case 'count': {
-      if (typeof value !== 'number') return 'is a figure';
-      if (spec.unit === 'count' && !Number.isInteger(value)) return 'is a whole number';
-      if (spec.min !== null && value < spec.min) return `is at least ${String(spec.min)} ${spec.unit}`;
-      if (spec.max !== null && value > spec.max) return `is at most ${String(spec.max)} ${spec.unit}`;
-      return null;
-    }
-  }
+  if (spec.unit === 'text') return typeof value === 'string' ? null : 'is put in words';
+  if (spec.unit === 'yes-no') return typeof value === 'boolean' ? null : 'is a yes or a no';
+  if (spec.unit === 'choice')
+    return spec.choices.some((choice) => choice.id === value) ? null : 'is one of its list';
+  if (typeof value !== 'number') return 'is a figure';
+  const unit = spec.unit === 'count' ? '' : ` ${spec.unit}`;
+  if (spec.unit === 'count' && !Number.isInteger(value)) return 'is a whole number';
+  if (spec.min !== null && value < spec.min) return `is at least ${String(spec.min)}${unit}`;
+  if (spec.max !== null && value > spec.max) return `is at most ${String(spec.max)}${unit}`;
+  return null;
 }
 
 type Say = (field: string, sentence: string) => void;

@@ -5,32 +5,17 @@ import { limits } from './limits.ts';
 import type { SurveyRecord } from './record.ts';
 import type { Way } from './rubric/types.ts';
 
+const half = (isGood: boolean): number => (isGood ? 1 : limits.outOfDateFactor);
+
 /** What share of its strength a way keeps: nothing without its test, half with an instrument out of date. */
 function factorOf(way: Way, record: SurveyRecord): number {
-  const half = (isGood: boolean) => (isGood ? 1 : limits.outOfDateFactor);
-  switch (way.id) {
-    case 'hydraulic':
-      return record.hydraulic === null ? 0 : half(hasInDate(record, 'test-gauge'));
-    case 'steam':
-      return record.steam?.raisedSteam === true ? half(hasInDate(record, 'test-gauge')) : 0;
-    case 'comparison':
-      return half(hasInDate(record, 'test-gauge'));
-    case 'co-meter':
-      return (record.steam?.coPpmAtOperator ?? null) === null ? 0 : half(hasInDate(record, 'co-meter'));
-    case 'sight':
-    case 'document':
-    case 'measure':
-    case 'gauge':
-    case 'sounding':
-    case 'borescope':
-    case 'calculation':
-    case 'hand-lift':
-    case 'blow-through':
-    case 'delivery':
-    case 'leak-spray':
-    case 'lit':
-      return 1;
-  }
+  if (way.id === 'hydraulic') return record.hydraulic === null ? 0 : half(hasInDate(record, 'test-gauge'));
+  if (way.id === 'steam')
+    return record.steam?.raisedSteam === true ? half(hasInDate(record, 'test-gauge')) : 0;
+  if (way.id === 'comparison') return half(hasInDate(record, 'test-gauge'));
+  if (way.id === 'co-meter')
+    return (record.steam?.coPpmAtOperator ?? null) === null ? 0 : half(hasInDate(record, 'co-meter'));
+  return 1;
 }
 
 /** How surely one criterion is known, 0–1: one less the product of what each way leaves unknown. */
