@@ -29,3 +29,9 @@ export const figure = (label: string, value: number, unit: Figure['unit']): Figu
   value,
   unit,
 });
+
+/** A thousandth of a bar: less than any gauge shows, more than a change of units can make. */
+const unseenPa = 100;
+
+/** Whether one pressure is above another by more than a change of units could make. */
+export const isAbove = (pa: number, limitPa: number): boolean => pa > limitPa + unseenPa;

@@ -1,4 +1,4 @@
-import { check, figure } from './check.ts';
+import { check, figure, isAbove } from './check.ts';
 import { valuesOf } from './examined.ts';
 import type { Examined, SurveyInput } from './examined.ts';
 import { limits } from './limits.ts';
@@ -29,7 +29,7 @@ export function valveLift({ facts, record }: SurveyInput): EngineeringCheck {
     );
   }
   const figures = [figure('Lifts at', lifts, 'Pa'), working(facts.workingPressurePa)];
-  return lifts > limit
+  return isAbove(lifts, limit)
     ? make.fail(
         `The safety valve lifted at ${pressureText(lifts)}; it should by ${pressureText(limit)}.`,
         figures,
@@ -48,7 +48,7 @@ export function accumulation({ facts, record }: SurveyInput): EngineeringCheck {
   const highest = steam.highestPressurePa;
   const limit = mostPa(facts.workingPressurePa);
   const figures = [figure('Highest pressure', highest, 'Pa'), working(facts.workingPressurePa)];
-  if (highest > limit)
+  if (isAbove(highest, limit))
     return make.fail(
       `Pressure rose to ${pressureText(highest)} with the fire full and everything shut; the most allowed is ${pressureText(limit)}.`,
       figures,
@@ -68,7 +68,7 @@ export function valveReseat({ record }: SurveyInput): EngineeringCheck {
   if (lifts === null || reseats === null) return make.cannotSay('Lift and reseat are not both recorded.');
   const figures = [figure('Lifts at', lifts, 'Pa'), figure('Reseats at', reseats, 'Pa')];
   // Not more than a tenth below the lift: Indian Boiler Regulations, regulation 295.
-  return reseats * 10 < lifts * 9
+  return isAbove((lifts * 9) / 10, reseats)
     ? make.fail(
         `It lifts at ${pressureText(lifts)} and does not reseat until ${pressureText(reseats)}, more than a tenth below.`,
         figures,

@@ -1,3 +1,5 @@
+import { gaugeError, gaugeRange } from './checks-gauge.ts';
+import { hydraulicTestCheck } from './checks-hydraulic.ts';
 import {
   accumulation,
   carbonMonoxide,
@@ -14,7 +16,10 @@ import type { EngineeringCheck } from './result.ts';
 /** Every engineering check that feeds the verdict or the report, always in this order. */
 export const checksFor = (input: SurveyInput, items: readonly Examined[]): EngineeringCheck[] => [
   barLitresCheck(input),
+  hydraulicTestCheck(input),
   jointMaterial(items),
+  gaugeRange(input, items),
+  gaugeError(items),
   valveLift(input),
   accumulation(input),
   valveReseat(input),

@@ -10,6 +10,19 @@ export const limits = {
   /** Sound or Serviceable on the weakest way alone, with no reason given, counts this much. */
   oneWayFactor: 0.5,
   calibrationMonths: 12,
+  /** Hydraulic test: multiples of working pressure as quoted from the UK hobby code of 2012; the local code governs. */
+  firstTestPercent: 200,
+  repeatTestPercent: 150,
+  testOverPercent: 6,
+  /** Common practice; small heating-boiler makers print the same. */
+  holdMinutes: 10,
+  holdFallPercent: 1,
+  /** The wettest class a gland may be and the test still stand. */
+  glandLeakClass: 2,
+  /** EN 837-2, steady pressure; from memory. */
+  gaugeSteadyPercent: 75,
+  /** EN 837-1 class assumed for a model's gauge. */
+  gaugeClassPercent: 2.5,
   /** Carbon monoxide, 15-minute limit. */
   coShortTermPpm: 100,
   coSource: 'UK workplace exposure limits EH40, short-term limit; from memory',

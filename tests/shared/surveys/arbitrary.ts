@@ -119,14 +119,14 @@ export function anyFinding(
     grade,
     ways: fc.subarray(criterion.ways.map((way) => way.id as string)),
     defects: fc.oneof(
-      { weight: 3, arbitrary: fc.constant([]) },
+      { weight: 3, arbitrary: fc.constant<FoundDefect[]>([]) },
       { weight: 1, arbitrary: fc.array(anyDefect(criterion), { maxLength: 3 }) },
     ),
     measurements:
       measurement === null
-        ? fc.constant([])
+        ? fc.constant<Measurement[]>([])
         : fc.oneof(
-            { weight: 3, arbitrary: fc.constant([]) },
+            { weight: 3, arbitrary: fc.constant<Measurement[]>([]) },
             { weight: 1, arbitrary: fc.array(measurement, { maxLength: 2 }) },
           ),
     photoIds: fc.array(fc.uuid(), { maxLength: 2 }),
