@@ -5,7 +5,7 @@ import { figureOf } from './examined.ts';
 import type { Examined, SurveyInput } from './examined.ts';
 import { limits } from './limits.ts';
 import type { EngineeringCheck } from './result.ts';
-import { lengthText, trim } from './words.ts';
+import { lengthText, rateText, trim } from './words.ts';
 
 export function barLitresCheck({ facts }: SurveyInput): EngineeringCheck {
   const make = check('bar-litres', 'Bar·litres', null);
@@ -51,4 +51,19 @@ export function secondFeed({ facts }: SurveyInput, items: readonly Examined[]): 
   if (grade === undefined || grade === 'notExamined')
     return make.cannotSay('The second means of feed was not examined.', figures);
   return make.pass('There is a second means of feed.', figures);
+}
+
+/** Delivery of the first means of feed against the steam made; both measured. */
+export function feedRate({ record }: SurveyInput, items: readonly Examined[]): EngineeringCheck {
+  const make = check('feed-rate', 'Feed against evaporation', 'feed.first');
+  const delivered = figureOf(items, 'feed.first', 'deliveryKgPerH');
+  const evaporated = record.steam?.evaporationKgPerH ?? null;
+  if (delivered === null || evaporated === null)
+    return make.cannotSay('Delivery and evaporation were not both measured.');
+  const figures = [figure('Delivered', delivered, 'kg/h'), figure('Evaporated', evaporated, 'kg/h')];
+  const told = `The first feed delivers ${rateText(delivered)} and the fire evaporates ${rateText(evaporated)}`;
+  if (delivered < evaporated) return make.fail(`${told}: it cannot keep up.`, figures);
+  return delivered * 10 < evaporated * 15
+    ? make.pass(`${told}: it keeps up, with less than the half as much again usually wanted.`, figures)
+    : make.pass(`${told}.`, figures);
 }

@@ -9,7 +9,7 @@ import {
   valveLift,
   valveReseat,
 } from './checks-steam.ts';
-import { barLitresCheck, secondFeed, waterLevel } from './checks-water.ts';
+import { barLitresCheck, feedRate, secondFeed, waterLevel } from './checks-water.ts';
 import type { Examined, SurveyInput } from './examined.ts';
 import type { EngineeringCheck } from './result.ts';
 
@@ -25,6 +25,7 @@ export const checksFor = (input: SurveyInput, items: readonly Examined[]): Engin
   valveReseat(input),
   gaugePassages(input),
   waterLevel(items),
+  feedRate(input, items),
   secondFeed(input, items),
   gasTightness(input),
   carbonMonoxide(input),

@@ -145,3 +145,17 @@ export function withFinding(
     },
   };
 }
+
+/** Surveys whose results are kept to the byte; a name is the name of its file under `published/`. */
+export const publishedSurveys: [name: string, survey: SurveyInput][] = [
+  ['nothing-wrong', goodSurvey()],
+  [
+    'worn-bush',
+    withFinding('shell.bushes', {
+      grade: 'attention',
+      defects: [{ code: 'bushes-worn', where: 'filler', note: '', remedy: null, allowance: null }],
+    }),
+  ],
+  ['carbon-monoxide', goodSurvey({ steam: { ...goodSteam, coPpmAtOperator: 120 } })],
+  ['cold-by-eye', { ...goodSurvey({ hydraulic: null, steam: null }), scope: 'external' }],
+];
