@@ -1,5 +1,7 @@
+import { valveCapacity } from './checks-capacity.ts';
 import { gaugeError, gaugeRange } from './checks-gauge.ts';
 import { hydraulicTestCheck } from './checks-hydraulic.ts';
+import { partsPressure } from './checks-parts.ts';
 import {
   accumulation,
   carbonMonoxide,
@@ -17,12 +19,14 @@ import type { EngineeringCheck } from './result.ts';
 export const checksFor = (input: SurveyInput, items: readonly Examined[]): EngineeringCheck[] => [
   barLitresCheck(input),
   hydraulicTestCheck(input),
+  partsPressure(input, items),
   jointMaterial(items),
   gaugeRange(input, items),
   gaugeError(items),
   valveLift(input),
   accumulation(input),
   valveReseat(input),
+  valveCapacity(input, items),
   gaugePassages(input),
   waterLevel(items),
   feedRate(input, items),

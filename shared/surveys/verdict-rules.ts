@@ -152,8 +152,7 @@ export const verdictRules = [
 export type RuleId = (typeof verdictRules)[number]['id'];
 
 /** The engineering checks that a rule listens to. */
-export type CheckId =
-  (typeof verdictRules)[number]['checks'][number] | 'bar-litres' | 'water-reserve' | 'gas-input';
+export type CheckId = (typeof verdictRules)[number]['checks'][number] | 'bar-litres';
 
 /** The rule that a defect marked as a stop fires. */
 export const ruleOfStop: Record<StopKind, RuleId> = {

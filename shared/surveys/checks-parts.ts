@@ -1,0 +1,90 @@
+import type { BoilerFacts } from '../boilers/boiler.ts';
+import { check, figure, isAbove } from './check.ts';
+import { figureOf } from './examined.ts';
+import type { Examined, SurveyInput } from './examined.ts';
+import { allowableStressPa, barrelPressurePa, fluePressurePa, stayedPlatePressurePa } from './strength.ts';
+import type { EngineeringCheck } from './result.ts';
+import { lengthText, pressureText } from './words.ts';
+
+interface Part {
+  title: string;
+  criterionId: string;
+  thicknessMm: number;
+  isMeasured: boolean;
+  standsPa: number;
+}
+
+const part = (
+  title: string,
+  criterionId: string,
+  measuredMm: number | null,
+  statedMm: number | null,
+  stands: (thicknessMm: number) => number | null,
+): Part[] => {
+  const thicknessMm = measuredMm ?? statedMm;
+  const standsPa = thicknessMm === null ? null : stands(thicknessMm);
+  return thicknessMm === null || standsPa === null
+    ? []
+    : [{ title, criterionId, thicknessMm, isMeasured: measuredMm !== null, standsPa }];
+};
+
+/** The parts whose pressure can be worked out from what was measured, or failing that from what the seller says. */
+function partsOf(facts: BoilerFacts, items: readonly Examined[]): Part[] {
+  const stressPa = allowableStressPa(facts.material, facts.workingPressurePa);
+  if (stressPa === null) return [];
+  const size = facts.dimensions;
+  const outsideMm =
+    figureOf(items, 'identity.match', 'outsideDiameterMm', 'most') ?? size.barrelOutsideDiameterMm;
+  const flueInsideMm = figureOf(items, 'shell.flue', 'insideDiameterMm', 'most') ?? size.flueDiameterMm;
+  const pitchMm = figureOf(items, 'shell.stays', 'pitchMm', 'most');
+  return [
+    ...part(
+      'Barrel',
+      'shell.barrel',
+      figureOf(items, 'shell.barrel', 'thinnestMm'),
+      size.barrelThicknessMm,
+      (thicknessMm) => barrelPressurePa({ outsideMm, thicknessMm, stressPa }),
+    ),
+    ...part(
+      'Flue',
+      'shell.flue',
+      figureOf(items, 'shell.flue', 'thinnestMm'),
+      size.flueThicknessMm,
+      (thicknessMm) =>
+        flueInsideMm === null
+          ? null
+          : fluePressurePa({ insideMm: flueInsideMm, thicknessMm, stressPa, material: facts.material }),
+    ),
+    ...part(
+      'Stayed plate',
+      'shell.stays',
+      figureOf(items, 'shell.plates', 'thinnestMm'),
+      size.endPlateThicknessMm,
+      (thicknessMm) => (pitchMm === null ? null : stayedPlatePressurePa({ pitchMm, thicknessMm, stressPa })),
+    ),
+  ];
+}
+
+/** What the thinnest parts will stand by calculation, against the claimed working pressure. */
+export function partsPressure({ facts }: SurveyInput, items: readonly Examined[]): EngineeringCheck {
+  const parts = partsOf(facts, items);
+  const measured = parts.filter(({ isMeasured }) => isMeasured);
+  const weakest = (measured.length > 0 ? measured : parts).toSorted((a, b) => a.standsPa - b.standsPa)[0];
+  const make = check('parts-pressure', 'What the parts will stand', weakest?.criterionId ?? 'shell.barrel');
+  if (weakest === undefined)
+    return make.cannotSay(
+      'Cannot be worked out: measure the wall of barrel, flue and plates. No stress is published here for brass.',
+    );
+  const standsPa = Math.floor(weakest.standsPa);
+  const figures = [
+    figure(`${weakest.title}, thickness`, weakest.thicknessMm, 'mm'),
+    figure(`${weakest.title} stands`, standsPa, 'Pa'),
+    figure('Claimed working pressure', facts.workingPressurePa, 'Pa'),
+  ];
+  const told = `${weakest.title} at ${lengthText(weakest.thicknessMm)} comes to ${pressureText(standsPa)} by calculation, for ${pressureText(facts.workingPressurePa)} claimed`;
+  if (!weakest.isMeasured)
+    return make.cannotSay(`On the seller’s figures, not measured: ${told}. Measure it.`, figures);
+  return isAbove(facts.workingPressurePa, standsPa)
+    ? make.fail(`${told}.`, figures)
+    : make.pass(`${told}.`, figures);
+}
