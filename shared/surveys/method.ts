@@ -101,6 +101,7 @@ const limitRow = (id: string, label: string, value: number, unit: string, source
   source,
 });
 const ours = 'this method';
+const hobbyCode = 'UK hobby code 2012, as quoted; the local code governs';
 
 /**
  * The published method, ready to be sent as JSON.
@@ -141,6 +142,43 @@ export function methodData(version: string = rubricVersion): MethodData {
         limits.accumulationPercent,
         '%',
         'common practice; the local code governs',
+      ),
+      limitRow(
+        'first-test',
+        'First hydraulic test, of working pressure',
+        limits.firstTestPercent,
+        '%',
+        hobbyCode,
+      ),
+      limitRow(
+        'repeat-test',
+        'Repeat hydraulic test, of working pressure',
+        limits.repeatTestPercent,
+        '%',
+        hobbyCode,
+      ),
+      limitRow(
+        'test-over',
+        'Most that the test pressure may be passed by',
+        limits.testOverPercent,
+        '%',
+        ours,
+      ),
+      limitRow('hold', 'Hydraulic hold, at least', limits.holdMinutes, 'minutes', 'common practice'),
+      limitRow('hold-fall', 'Most that pressure may fall over the hold', limits.holdFallPercent, '%', ours),
+      limitRow(
+        'gauge-steady',
+        'Working pressure, at most, of the gauge’s full scale',
+        limits.gaugeSteadyPercent,
+        '%',
+        'EN 837-2, from memory',
+      ),
+      limitRow(
+        'gauge-class',
+        'Class assumed for the boiler’s gauge',
+        limits.gaugeClassPercent,
+        '%',
+        'EN 837-1',
       ),
       limitRow(
         'calibration',
