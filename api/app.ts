@@ -9,6 +9,7 @@ import { authenticate } from './auth/authenticate.ts';
 import { ctxFrom } from './deps.ts';
 import type { Deps } from './deps.ts';
 import { accountRoutes } from './features/accounts/routes.ts';
+import { methodRoutes } from './features/method/routes.ts';
 import { placeRoutes } from './features/places/routes.ts';
 import { perMinute, sameOriginOnly, securityHeaders } from './http/guards.ts';
 import { healthRoutes } from './http/health.ts';
@@ -73,6 +74,7 @@ export function createApp(deps: Deps): Express {
 
   app.use('/api', sameOriginOnly(publicUrl), express.json({ limit: '1mb' }), attachCtx(deps));
   app.use(accountRoutes(deps.letters), placeRoutes);
+  app.use(methodRoutes(deps.rateFactor));
   app.use(openApiRoute(publicUrl));
   app.use('/api', nothingHere);
 
