@@ -1,0 +1,88 @@
+import { eq } from 'drizzle-orm';
+import type { OrderStatus } from '#shared/survey-orders/machine.ts';
+import type { ExtraId } from '#shared/surveys/scopes.ts';
+import type { Instant } from '#shared/time.ts';
+import type { Db } from '../../db/client.ts';
+import { listings, reports, surveyOrders, surveyors, user } from '../../db/schema/index.ts';
+import type { Filed } from './digest.ts';
+
+export interface StoredReport extends Filed {
+  id: string;
+  order: { id: string; status: OrderStatus; buyerId: string; sellerId: string };
+  listing: { id: string; slug: string; title: string };
+  surveyor: { id: string; name: string; number: string };
+  filedAt: Instant;
+  digest: string;
+  checkCode: string;
+}
+
+export interface NewReport extends Filed {
+  orderId: string;
+  listingId: string;
+  surveyorId: string;
+  filedAt: Instant;
+  digest: string;
+  checkCode: string;
+}
+
+export async function insertReport(db: Db, report: NewReport): Promise<string> {
+  const [row] = await db
+    .insert(reports)
+    .values({ ...report, extras: [...report.extras], filedAt: new Date(report.filedAt) })
+    .returning({ id: reports.id });
+  if (!row) throw new Error('The report was not stored');
+  return row.id;
+}
+
+const find = (db: Db) =>
+  db
+    .select({
+      report: reports,
+      order: {
+        id: surveyOrders.id,
+        status: surveyOrders.status,
+        buyerId: surveyOrders.buyerId,
+        sellerId: surveyOrders.sellerId,
+      },
+      listing: { id: listings.id, slug: listings.slug, draft: listings.draft },
+      surveyorName: user.name,
+      surveyorNumber: surveyors.number,
+    })
+    .from(reports)
+    .innerJoin(surveyOrders, eq(surveyOrders.id, reports.orderId))
+    .innerJoin(listings, eq(listings.id, reports.listingId))
+    .innerJoin(user, eq(user.id, reports.surveyorId))
+    .leftJoin(surveyors, eq(surveyors.userId, reports.surveyorId));
+
+type Row = Awaited<ReturnType<typeof find>>[number];
+
+const fromRow = ({ report, order, listing, surveyorName, surveyorNumber }: Row): StoredReport => ({
+  id: report.id,
+  order,
+  listing: { id: listing.id, slug: listing.slug, title: listing.draft.title },
+  surveyor: {
+    id: report.surveyorId,
+    name: surveyorName,
+    number: surveyorNumber === null ? '' : String(surveyorNumber).padStart(3, '0'),
+  },
+  scope: report.scope,
+  extras: report.extras as ExtraId[],
+  facts: report.facts,
+  record: report.record,
+  result: report.result,
+  signOff: report.signOff,
+  rubricVersion: report.rubricVersion,
+  filedAt: report.filedAt.toISOString(),
+  digest: report.digest,
+  checkCode: report.checkCode,
+});
+
+export async function findReport(db: Db, id: string): Promise<StoredReport | undefined> {
+  const [row] = await find(db).where(eq(reports.id, id));
+  return row && fromRow(row);
+}
+
+export async function findReportByCode(db: Db, checkCode: string): Promise<StoredReport | undefined> {
+  const [row] = await find(db).where(eq(reports.checkCode, checkCode));
+  return row && fromRow(row);
+}

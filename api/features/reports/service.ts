@@ -1,0 +1,95 @@
+import { Problem } from '#shared/problem.ts';
+import type { Photo } from '#shared/listings/pictures.ts';
+import { surveyOrderMachine } from '#shared/survey-orders/machine.ts';
+import type { Report } from '#shared/surveys/contract.ts';
+import type { Instant } from '#shared/time.ts';
+import type { Ctx } from '../../ctx.ts';
+import * as photos from '../photos/service.ts';
+import { checkCodeOf, digestOf, readCheckCode } from './digest.ts';
+import type { Filed } from './digest.ts';
+import * as repo from './repo.ts';
+import type { StoredReport } from './repo.ts';
+
+const photoIdsOf = ({ record }: Filed): Set<string> =>
+  new Set(record.findings.flatMap(({ photoIds }) => photoIds));
+
+/** The photographs that findings name; others taken on the day are no part of the report. */
+const shownIn = <P extends { id: string }>(filed: Filed, held: readonly P[]): P[] => {
+  const named = photoIdsOf(filed);
+  return held.filter(({ id }) => named.has(id));
+};
+
+interface Filing {
+  orderId: string;
+  listingId: string;
+  surveyorId: string;
+  filed: Filed;
+  photos: readonly Photo[];
+}
+
+/** Freezes what was filed, under its digest and check code. The caller has made sure that it may. */
+export async function keepReport(ctx: Ctx, filing: Filing): Promise<string> {
+  const { orderId, listingId, surveyorId, filed } = filing;
+  const digest = digestOf(filed, shownIn(filed, filing.photos));
+  return repo.insertReport(ctx.db, {
+    ...filed,
+    orderId,
+    listingId,
+    surveyorId,
+    filedAt: ctx.now(),
+    digest,
+    checkCode: checkCodeOf(digest),
+  });
+}
+
+function viewerOf(ctx: Ctx, { order, surveyor }: StoredReport): Report['viewer'] {
+  const { actor } = ctx;
+  if (!actor) return { orderId: null, canAccept: false };
+  const isParty = [order.buyerId, order.sellerId, surveyor.id].includes(actor.id);
+  return {
+    orderId: isParty || actor.roles.has('office') ? order.id : null,
+    canAccept:
+      actor.id === order.buyerId && surveyOrderMachine.events(order.status, 'buyer').includes('acceptReport'),
+  };
+}
+
+/** A filed report, open to everyone; the parties to the sale are not named in it. @throws Problem not-found. */
+export async function getReport(ctx: Ctx, id: string): Promise<Report> {
+  const stored = await repo.findReport(ctx.db, id);
+  if (!stored) throw new Problem('not-found');
+  const { listing, surveyor, facts, scope, extras, record, result, signOff, filedAt, checkCode } = stored;
+  const held = await photos.listPhotosOfOrder(ctx, stored.order.id);
+  return {
+    id,
+    listing,
+    surveyor: { name: surveyor.name, number: surveyor.number },
+    facts,
+    scope,
+    extras: [...extras],
+    record,
+    result,
+    photos: shownIn(stored, held),
+    signOff,
+    filedAt,
+    checkCode,
+    sellerPhotos: await photos.listPhotosOfListing(ctx, listing.id),
+    viewer: viewerOf(ctx, stored),
+  };
+}
+
+interface Checked {
+  status: 'genuine' | 'changed' | 'unknown';
+  reportId: string | null;
+  filedAt: Instant | null;
+}
+
+/** Works the digest out again from what is stored now, and says whether it is still the one that was filed. */
+export async function checkReport(ctx: Ctx, typed: string): Promise<Checked> {
+  const code = readCheckCode(typed);
+  const stored = code === undefined ? undefined : await repo.findReportByCode(ctx.db, code);
+  if (!stored) return { status: 'unknown', reportId: null, filedAt: null };
+  const held = await photos.listPhotosOfOrder(ctx, stored.order.id);
+  const digest = digestOf(stored, shownIn(stored, held));
+  const isGenuine = digest === stored.digest && checkCodeOf(digest) === stored.checkCode;
+  return { status: isGenuine ? 'genuine' : 'changed', reportId: stored.id, filedAt: stored.filedAt };
+}
