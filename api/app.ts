@@ -9,7 +9,9 @@ import { authenticate } from './auth/authenticate.ts';
 import { ctxFrom } from './deps.ts';
 import type { Deps } from './deps.ts';
 import { accountRoutes } from './features/accounts/routes.ts';
+import { listingRoutes } from './features/listings/routes.ts';
 import { methodRoutes } from './features/method/routes.ts';
+import { photoRoutes } from './features/photos/routes.ts';
 import { placeRoutes } from './features/places/routes.ts';
 import { perMinute, sameOriginOnly, securityHeaders } from './http/guards.ts';
 import { healthRoutes } from './http/health.ts';
@@ -73,7 +75,8 @@ export function createApp(deps: Deps): Express {
   app.all('/api/auth/{*any}', toNodeHandler(deps.auth));
 
   app.use('/api', sameOriginOnly(publicUrl), express.json({ limit: '1mb' }), attachCtx(deps));
-  app.use(accountRoutes(deps.letters), placeRoutes);
+  app.use('/media', attachCtx(deps));
+  app.use(accountRoutes(deps.letters), placeRoutes, listingRoutes, photoRoutes(deps.uploadsDir));
   app.use(methodRoutes(deps.rateFactor));
   app.use(openApiRoute(publicUrl));
   app.use('/api', nothingHere);
