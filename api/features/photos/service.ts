@@ -269,7 +269,7 @@ async function open(ctx: Ctx, key: string, mime: string): Promise<Served> {
   return { ...file, mime };
 }
 
-const variantName = /^(\d{1,5})\.(avif|jpeg)$/;
+const variantName = /^([1-9]\d{0,4})\.(avif|jpeg)$/;
 
 /**
  * One variant of a photograph, for whoever may look: anyone, once it is of a listed boiler or a filed report;

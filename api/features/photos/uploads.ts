@@ -32,6 +32,12 @@ const unexpected = () =>
     'The file arrived but could not be taken in just now. It is kept: send it again and only the last step is repeated.',
   );
 
+/** An empty value travels as a name without one, so it is the same as none. */
+const withoutNulls = (fields: Record<string, string | null> = {}): Record<string, string> =>
+  Object.fromEntries(
+    Object.entries(fields).flatMap(([name, value]) => (value === null ? [] : [[name, value]])),
+  );
+
 function readMetadata(header: string | undefined): UploadMetadata {
   let fields: Record<string, string | null> = {};
   try {
@@ -39,7 +45,7 @@ function readMetadata(header: string | undefined): UploadMetadata {
   } catch {
     throw new Problem('bad-request', 'Say what the file is for in Upload-Metadata.');
   }
-  const parsed = uploadMetadata.safeParse(fields);
+  const parsed = uploadMetadata.safeParse(withoutNulls(fields));
   if (!parsed.success) throw invalidInput(parsed.error);
   return parsed.data;
 }
@@ -76,7 +82,7 @@ export function createUploads(folder: string, writeProblem: WriteProblem) {
       const content = await readFile(path.join(folder, upload.id));
       await service.receiveUpload(ctx, {
         id: upload.id,
-        metadata: uploadMetadata.parse(upload.metadata),
+        metadata: uploadMetadata.parse(withoutNulls(upload.metadata)),
         content,
       });
     } catch (error) {
