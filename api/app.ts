@@ -9,10 +9,12 @@ import { authenticate } from './auth/authenticate.ts';
 import { ctxFrom } from './deps.ts';
 import type { Deps } from './deps.ts';
 import { accountRoutes } from './features/accounts/routes.ts';
+import { examinationRoutes } from './features/examinations/routes.ts';
 import { listingRoutes } from './features/listings/routes.ts';
 import { methodRoutes } from './features/method/routes.ts';
 import { photoRoutes } from './features/photos/routes.ts';
 import { placeRoutes } from './features/places/routes.ts';
+import { reportRoutes } from './features/reports/routes.ts';
 import { perMinute, sameOriginOnly, securityHeaders } from './http/guards.ts';
 import { healthRoutes } from './http/health.ts';
 import { openApiRoute } from './http/openapi.ts';
@@ -77,7 +79,7 @@ export function createApp(deps: Deps): Express {
   app.use('/api', sameOriginOnly(publicUrl), express.json({ limit: '1mb' }), attachCtx(deps));
   app.use('/media', attachCtx(deps));
   app.use(accountRoutes(deps.letters), placeRoutes, listingRoutes, photoRoutes(deps.uploadsDir));
-  app.use(methodRoutes(deps.rateFactor));
+  app.use(examinationRoutes, reportRoutes, methodRoutes(deps.rateFactor));
   app.use(openApiRoute(publicUrl));
   app.use('/api', nothingHere);
 

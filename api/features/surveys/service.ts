@@ -12,8 +12,8 @@ import type { StoredSurvey } from './repo.ts';
 export type { StoredSurvey } from './repo.ts';
 
 /** Opens the survey of an order whose examination begins: the seller's statement is copied as it stands now. */
-export async function openSurvey(ctx: Ctx, order: { id: string; listing: { id: string } }): Promise<void> {
-  const facts = await repo.findListedFacts(ctx.db, order.listing.id);
+export async function openSurvey(ctx: Ctx, order: { id: string; listingId: string }): Promise<void> {
+  const facts = await repo.findListedFacts(ctx.db, order.listingId);
   if (!facts) throw new Problem('not-found');
   await repo.insertSurvey(ctx.db, {
     orderId: order.id,
