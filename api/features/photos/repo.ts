@@ -180,7 +180,8 @@ export async function findPhotoAccess(
   personId: string | null,
 ): Promise<(Access & Pick<StoredPhoto, 'ownerId' | 'widths' | 'listingId'>) | undefined> {
   const sameReport = or(eq(reports.listingId, photos.listingId), eq(reports.orderId, photos.orderId));
-  const sameOrder = or(eq(surveyOrders.listingId, photos.listingId), eq(surveyOrders.id, photos.orderId));
+  // A survey's photographs are its surveyor's alone until the report is filed, and everyone's after that.
+  const sameOrder = eq(surveyOrders.listingId, photos.listingId);
   const [row] = await db
     .select({
       ownerId: photos.ownerId,

@@ -273,7 +273,7 @@ const variantName = /^([1-9]\d{0,4})\.(avif|jpeg)$/;
 
 /**
  * One variant of a photograph, for whoever may look: anyone, once it is of a listed boiler or a filed report;
- * before that its owner, the parties to an order, and the office.
+ * before that its owner, the office and, if the seller took it, the parties to an order for the boiler.
  * @param name such as `960.avif`.
  * @throws Problem not-found.
  */
