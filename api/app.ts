@@ -10,11 +10,16 @@ import { ctxFrom } from './deps.ts';
 import type { Deps } from './deps.ts';
 import { accountRoutes } from './features/accounts/routes.ts';
 import { examinationRoutes } from './features/examinations/routes.ts';
+import { deskRoutes } from './features/desk/routes.ts';
 import { listingRoutes } from './features/listings/routes.ts';
 import { methodRoutes } from './features/method/routes.ts';
+import { officeRoutes } from './features/office/routes.ts';
 import { photoRoutes } from './features/photos/routes.ts';
 import { placeRoutes } from './features/places/routes.ts';
 import { reportRoutes } from './features/reports/routes.ts';
+import { paymentNoticeRoutes } from './features/settlements/routes.ts';
+import { surveyOrderRoutes } from './features/survey-orders/routes.ts';
+import { surveyorRoutes } from './features/surveyors/routes.ts';
 import { perMinute, sameOriginOnly, securityHeaders } from './http/guards.ts';
 import { healthRoutes } from './http/health.ts';
 import { openApiRoute } from './http/openapi.ts';
@@ -34,6 +39,14 @@ const attachCtx =
       fromNodeHeaders(request.headers),
     );
     response.locals['ctx'] = ctxFrom(deps, actor);
+    next();
+  };
+
+/** What comes from a machine has no person behind it. */
+const attachSystemCtx =
+  (deps: Deps): RequestHandler =>
+  (_request, response, next) => {
+    response.locals['ctx'] = ctxFrom(deps);
     next();
   };
 
@@ -76,10 +89,15 @@ export function createApp(deps: Deps): Express {
   // Ahead of the JSON parser: better-auth reads its own bodies.
   app.all('/api/auth/{*any}', toNodeHandler(deps.auth));
 
+  // Likewise the payment service's notices, whose signature is over the bytes; no browser sends them.
+  app.use('/api/payments/notices', express.raw({ type: () => true, limit: '512kb' }), attachSystemCtx(deps));
+  app.use(paymentNoticeRoutes);
+
   app.use('/api', sameOriginOnly(publicUrl), express.json({ limit: '1mb' }), attachCtx(deps));
   app.use('/media', attachCtx(deps));
   app.use(accountRoutes(deps.letters), placeRoutes, listingRoutes, photoRoutes(deps.uploadsDir));
   app.use(examinationRoutes, reportRoutes, methodRoutes(deps.rateFactor));
+  app.use(surveyorRoutes, surveyOrderRoutes, deskRoutes, officeRoutes);
   app.use(openApiRoute(publicUrl));
   app.use('/api', nothingHere);
 

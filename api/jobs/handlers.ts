@@ -1,4 +1,6 @@
 import type { Ctx } from '../ctx.ts';
+import * as settlements from '../features/settlements/service.ts';
+import * as surveyOrders from '../features/survey-orders/service.ts';
 import type { Job } from './jobs.ts';
 
 /** Does a promised job. Every one may run twice: each looks first whether it still needs doing. */
@@ -15,5 +17,15 @@ export async function handleJob(ctx: Ctx, job: Job): Promise<void> {
       });
       return;
     }
+    case 'lapse-order':
+      return surveyOrders.lapseOrder(ctx, job.data.orderId);
+    case 'end-review':
+      return surveyOrders.endReview(ctx, job.data.orderId);
+    case 'release-fee':
+      return settlements.releaseFee(ctx, job.data.orderId);
+    case 'refund-order':
+      return settlements.refundOrder(ctx, job.data.orderId);
+    case 'reconcile-payments':
+      return settlements.reconcile(ctx);
   }
 }

@@ -1,5 +1,3 @@
-import type { Instant } from '#shared/time.ts';
-
 export interface LetterJob {
   to: string;
   subject: string;
@@ -14,7 +12,7 @@ export interface Jobs {
   'end-review': { orderId: string };
   'release-fee': { orderId: string };
   'refund-order': { orderId: string };
-  'reconcile-payments': { since?: Instant };
+  'reconcile-payments': Record<string, never>;
 }
 
 export type JobKind = keyof Jobs;

@@ -21,7 +21,8 @@ export const orderSummary = z.object({
   part: z.enum(['buyer', 'seller', 'surveyor', 'office']),
   scope: scopeId,
   listing: z.object({ id: z.uuid(), slug: z.string(), title: z.string(), town, cover: photo.nullable() }),
-  total: money,
+  /** What the buyer pays; null for the seller, who sees no money that is not his. */
+  total: money.nullable(),
   placedAt: instant,
   /** When something happens by itself unless somebody acts. */
   dueAt: instant.nullable(),
@@ -34,7 +35,7 @@ export const surveyOrder = orderSummary.extend({
   buyer: z.object({ name: z.string() }),
   seller: z.object({ name: z.string() }),
   surveyor,
-  /** The seller sees no money that is not his. */
+  /** Null for the seller. */
   quotation: quotation.nullable(),
   proposedTimes: z.array(instant),
   /** For the surveyor once a time is agreed, and the seller whose it is. */
