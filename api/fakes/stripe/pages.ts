@@ -65,7 +65,8 @@ export function pages(store: Store, notices: Notices): Router {
   const successUrl = (session: Thing): string =>
     String(session['success_url']).replaceAll('{CHECKOUT_SESSION_ID}', session.id);
 
-  router.use(express.urlencoded({ extended: false, limit: '10kb' }));
+  // Only here: the API's own bodies nest.
+  router.use(['/pay', '/set-up'], express.urlencoded({ extended: false, limit: '10kb' }));
   router.get('/style.css', (_request, response) => {
     response.type('css').send(style);
   });
