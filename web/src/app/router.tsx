@@ -1,0 +1,33 @@
+import { createBrowserRouter } from 'react-router-dom';
+import type { RouteObject } from 'react-router-dom';
+import { ErrorPage } from './error-page.tsx';
+import { Layout } from './layout.tsx';
+
+type PageModule = Promise<{ Component: () => React.ReactNode }>;
+
+/** One page: its module is fetched when somebody goes there. */
+const at = (path: string, load: () => PageModule): RouteObject => ({
+  path,
+  lazy: load,
+  errorElement: <ErrorPage />,
+});
+
+export const router = createBrowserRouter([
+  {
+    element: <Layout />,
+    errorElement: <ErrorPage isWhole />,
+    hydrateFallbackElement: <div />,
+    children: [
+      at('/', () => import('#web/pages/home-page.tsx')),
+      at('/sign-in', () => import('#web/pages/sign-in-page.tsx')),
+      at('/sign-up', () => import('#web/pages/sign-up-page.tsx')),
+      at('/forgotten', () => import('#web/pages/forgotten-page.tsx')),
+      at('/reset', () => import('#web/pages/reset-page.tsx')),
+      at('/verify', () => import('#web/pages/verify-page.tsx')),
+      at('/account', () => import('#web/pages/account-page.tsx')),
+      at('/letters', () => import('#web/pages/letters-page.tsx')),
+      at('/problems/:slug', () => import('#web/pages/problem-page.tsx')),
+      at('*', () => import('#web/pages/not-found-page.tsx')),
+    ],
+  },
+]);
