@@ -27,6 +27,7 @@ export const router = createBrowserRouter([
       at('/account', () => import('#web/pages/account-page.tsx')),
       at('/letters', () => import('#web/pages/letters-page.tsx')),
       at('/problems/:slug', () => import('#web/pages/problem-page.tsx')),
+      at('/surveys/:id/examine', () => import('#web/pages/examine-page.tsx')),
       at('*', () => import('#web/pages/not-found-page.tsx')),
     ],
   },

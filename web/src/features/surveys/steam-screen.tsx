@@ -1,0 +1,220 @@
+import type { BoilerFacts } from '#shared/boilers/boiler.ts';
+import { limits } from '#shared/surveys/limits.ts';
+import type { SteamTest, SurveyRecord } from '#shared/surveys/record.ts';
+import { useUnits } from '#web/lib/units.tsx';
+import { Button } from '#web/ui/button.tsx';
+import { Check } from '#web/ui/check.tsx';
+import { Caution } from '#web/ui/notes.tsx';
+import { FigureInput } from './figure-input.tsx';
+import { ReadingsTable } from './readings-table.tsx';
+import { changeSteam, emptySteam } from './record-edits.ts';
+import type { Edit } from './record-edits.ts';
+import { WordsInput } from './words-input.tsx';
+import { YesNo } from './yes-no.tsx';
+
+interface Props {
+  facts: BoilerFacts;
+  record: SurveyRecord;
+  edit: (change: Edit) => void;
+}
+
+/** The test under steam. */
+export function SteamScreen({ facts, record, edit }: Props) {
+  const { steam: test } = record;
+  return (
+    <div className="grid gap-6">
+      <Caution title="Eyes covered, and nobody in line with a fitting.">
+        Fire out of doors or with the doors open. A boiler that failed its hydraulic test is not lit. Follow
+        your local code and your boiler inspector.
+      </Caution>
+      {facts.firing !== 'electric' && (
+        <Caution title="Carbon monoxide cannot be smelt.">
+          Have the meter running at the operator’s face. If it sounds, shut off the fuel and leave.
+        </Caution>
+      )}
+      {test === null ? (
+        <>
+          <Button
+            isWide
+            onClick={() => {
+              edit((so) => ({ ...so, steam: emptySteam }));
+            }}
+          >
+            Record a steam test
+          </Button>
+          <WordsInput
+            label="Or say why there was none"
+            most={400}
+            rows={2}
+            value={record.noSteamReason}
+            onChange={(noSteamReason) => {
+              edit((so) => ({ ...so, noSteamReason }));
+            }}
+          />
+        </>
+      ) : (
+        <TestFields
+          facts={facts}
+          test={test}
+          onChange={(change) => {
+            edit(changeSteam(change));
+          }}
+          onRemove={() => {
+            edit((so) => ({ ...so, steam: null }));
+          }}
+        />
+      )}
+    </div>
+  );
+}
+
+interface TestProps {
+  facts: BoilerFacts;
+  test: SteamTest;
+  onChange: (change: Partial<SteamTest>) => void;
+  onRemove: () => void;
+}
+
+function TestFields({ facts, test, onChange, onRemove }: TestProps) {
+  const { show } = useUnits();
+  const mostPa = (facts.workingPressurePa * (100 + limits.accumulationPercent)) / 100;
+  const pressure = { unit: 'Pa', min: 0, max: 6_000_000 } as const;
+  return (
+    <>
+      <Check
+        label="Steam was raised to working pressure"
+        checked={test.raisedSteam}
+        onChange={({ target }) => {
+          onChange({ raisedSteam: target.checked });
+        }}
+      />
+      <FigureInput
+        label="Time to working pressure"
+        unit="min"
+        min={0}
+        max={600}
+        value={test.minutesToWorkingPressure}
+        onChange={(minutesToWorkingPressure) => {
+          onChange({ minutesToWorkingPressure });
+        }}
+      />
+      <section className="grid gap-4" aria-label="Safety valve">
+        <div>
+          <h3>Safety valve</h3>
+          <p className="text-[0.9375rem] leading-6 text-pencil">
+            It must lift, and hold the pressure with full fire and everything shut, by{' '}
+            {show('pressure', mostPa)}: a tenth above working pressure.
+          </p>
+        </div>
+        <FigureInput
+          label="Lifts at"
+          {...pressure}
+          value={test.valveLiftsAtPa}
+          onChange={(valveLiftsAtPa) => {
+            onChange({ valveLiftsAtPa });
+          }}
+        />
+        <FigureInput
+          label="Highest pressure, full fire, stop valve and feed shut"
+          {...pressure}
+          value={test.highestPressurePa}
+          onChange={(highestPressurePa) => {
+            onChange({ highestPressurePa });
+          }}
+        />
+        <FigureInput
+          label="Reseats at"
+          {...pressure}
+          value={test.valveReseatsAtPa}
+          onChange={(valveReseatsAtPa) => {
+            onChange({ valveReseatsAtPa });
+          }}
+        />
+      </section>
+      <section className="grid gap-4" aria-label="Water gauge and feed">
+        <h3>Water gauge and feed</h3>
+        <Check
+          label="Water gauge blown through under steam"
+          checked={test.gaugeBlownThrough}
+          onChange={({ target }) => {
+            onChange({ gaugeBlownThrough: target.checked });
+          }}
+        />
+        <YesNo
+          label="Both passages clear"
+          value={test.passagesClear}
+          onChange={(passagesClear) => {
+            onChange({ passagesClear });
+          }}
+        />
+        <YesNo
+          label="Feeds delivered against pressure"
+          value={test.feedsDelivered}
+          onChange={(feedsDelivered) => {
+            onChange({ feedsDelivered });
+          }}
+        />
+        <FigureInput
+          label="Water evaporated, by timed feed"
+          unit="kg/h"
+          min={0}
+          max={500}
+          value={test.evaporationKgPerH}
+          onChange={(evaporationKgPerH) => {
+            onChange({ evaporationKgPerH });
+          }}
+        />
+      </section>
+      <section className="grid gap-4" aria-label="Fire">
+        <h3>Fire</h3>
+        <YesNo
+          label="Flame settled"
+          value={test.flameSettled}
+          onChange={(flameSettled) => {
+            onChange({ flameSettled });
+          }}
+        />
+        {facts.firing === 'gas' && (
+          <YesNo
+            label="Gas tight"
+            value={test.gasTight}
+            onChange={(gasTight) => {
+              onChange({ gasTight });
+            }}
+          />
+        )}
+        <FigureInput
+          label="Carbon monoxide at the operator"
+          unit="ppm"
+          min={0}
+          max={5_000}
+          value={test.coPpmAtOperator}
+          onChange={(coPpmAtOperator) => {
+            onChange({ coPpmAtOperator });
+          }}
+        />
+      </section>
+      <ReadingsTable
+        readings={test.readings}
+        from="lighting up"
+        onChange={(readings) => {
+          onChange({ readings });
+        }}
+      />
+      <WordsInput
+        label="Note"
+        most={1_000}
+        rows={3}
+        value={test.note}
+        onChange={(note) => {
+          onChange({ note });
+        }}
+      />
+      <div>
+        <Button kind="danger" onClick={onRemove}>
+          Take this test off the record
+        </Button>
+      </div>
+    </>
+  );
+}
