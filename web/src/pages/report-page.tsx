@@ -1,0 +1,136 @@
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { Link, useParams } from 'react-router-dom';
+import { extras, scopes } from '#shared/surveys/scopes.ts';
+import { sitePaths } from '#shared/site-paths.ts';
+import { AcceptReport } from '#web/features/reports/accept-report.tsx';
+import { ChecksList } from '#web/features/reports/checks-list.tsx';
+import { foundId } from '#web/features/reports/found-item.tsx';
+import { FoundList } from '#web/features/reports/found-list.tsx';
+import { InstrumentsTable } from '#web/features/reports/instruments-table.tsx';
+import { PutRight } from '#web/features/reports/put-right.tsx';
+import { reportQueries } from '#web/features/reports/queries.ts';
+import { ResultSummary } from '#web/features/reports/result-summary.tsx';
+import { SectionMeans } from '#web/features/reports/section-means.tsx';
+import { HydraulicRecord, SteamRecord } from '#web/features/reports/test-records.tsx';
+import { formatDay, formatInstant } from '#web/lib/format.ts';
+import { useUnits } from '#web/lib/units.tsx';
+import { TitleBlock } from '#web/ui/figures.tsx';
+import { Caution } from '#web/ui/notes.tsx';
+import { Page, Section } from '#web/ui/page.tsx';
+import { PhotoViewer } from '#web/ui/photo-viewer.tsx';
+
+/** A filed report, for anyone. */
+export function Component() {
+  const { id = '' } = useParams();
+  const { data: report } = useSuspenseQuery(reportQueries.detail(id));
+  const { show } = useUnits();
+  const { listing, surveyor, facts, scope, record, result, photos, sellerPhotos, viewer } = report;
+  const examined = record.examinedOn === null ? formatInstant(report.filedAt) : formatDay(record.examinedOn);
+  const covered = [scopes[scope].label, ...report.extras.map((extra) => extras[extra].label)];
+  return (
+    <Page
+      title={listing.title}
+      crumbs={[
+        { label: 'Boilers', to: sitePaths.boilers },
+        { label: listing.title, to: sitePaths.listing(listing.slug) },
+        { label: 'Survey report' },
+      ]}
+      sub={`Examined ${examined} · ${covered.join(', ').toLowerCase()} · claimed working pressure ${show('pressure', facts.workingPressurePa)}`}
+    >
+      {viewer.canAccept && viewer.orderId !== null && (
+        <div className="mb-6">
+          <AcceptReport orderId={viewer.orderId} />
+        </div>
+      )}
+      <div className="grid items-start gap-6 lg:grid-cols-[minmax(0,5fr)_minmax(0,7fr)]">
+        <div className="grid gap-6">
+          <ResultSummary result={result} hrefOf={(criterionId) => `#${foundId(criterionId)}`} />
+          <Caution title="This is not a certificate.">
+            It says what was found on one day. Before the boiler is steamed again, your club’s or insurer’s
+            boiler inspector must test it under your local code.
+          </Caution>
+        </div>
+        {photos.length > 0 && (
+          <PhotoViewer photos={photos} title="The surveyor’s photographs" layout="lead" />
+        )}
+      </div>
+      {record.summary !== '' && (
+        <Section title="From the surveyor">
+          <p className="max-w-prose whitespace-pre-line">{record.summary}</p>
+        </Section>
+      )}
+      <div className="mt-10 grid gap-x-10 lg:grid-cols-2">
+        <Section title="What it would take to put right">
+          <PutRight report={report} />
+        </Section>
+        <div className="mt-10 lg:mt-0">
+          <Section title="Section by section">
+            <SectionMeans sections={result.sections} />
+          </Section>
+        </div>
+      </div>
+      <Section title="What was found">
+        <FoundList report={report} />
+      </Section>
+      <div className="mt-10 grid gap-x-10 lg:grid-cols-2">
+        <Section title="Hydraulic test">
+          <HydraulicRecord report={report} />
+        </Section>
+        <div className="mt-10 lg:mt-0">
+          <Section title="Steam test">
+            <SteamRecord report={report} />
+          </Section>
+        </div>
+      </div>
+      <Section title="Engineering checks">
+        <ChecksList checks={result.checks} />
+      </Section>
+      <Section title="Instruments">
+        <InstrumentsTable record={record} />
+      </Section>
+      {sellerPhotos.length > 0 && (
+        <Section title="The seller’s photographs">
+          <PhotoViewer photos={sellerPhotos} title="The seller’s photographs" layout="row" />
+        </Section>
+      )}
+      <Section title="Limits of this report">
+        <ul className="max-w-prose list-disc pl-5">
+          <li>It covers what the scope covers and no more: {scopes[scope].covers}</li>
+          <li>
+            It speaks of the day of examination only. A boiler can change in store, in carriage and in steam.
+          </li>
+          <li>What is marked Not examined was not examined, and nothing is implied about it.</li>
+          <li>
+            It was scored by the <Link to={sitePaths.method}>published method</Link>, version{' '}
+            {record.rubricVersion}; anyone can work it out again from what is recorded here.
+          </li>
+          <li>
+            It is no certificate and no permission to steam. Follow your local code and your boiler inspector.
+          </li>
+        </ul>
+      </Section>
+      <TitleBlock
+        items={[
+          { label: 'Boiler', value: listing.title },
+          {
+            label: 'Surveyor',
+            value: surveyor.number === '' ? surveyor.name : `${surveyor.name}, no. ${surveyor.number}`,
+          },
+          {
+            label: 'Signed and filed',
+            value: `${report.signOff.name}, ${formatDay(report.filedAt.slice(0, 10))}`,
+          },
+          { label: 'Method', value: record.rubricVersion },
+          {
+            label: 'Check code',
+            value: (
+              <Link className="link" to={sitePaths.checkCode(report.checkCode)}>
+                {report.checkCode}
+              </Link>
+            ),
+          },
+        ]}
+      />
+    </Page>
+  );
+}
