@@ -1,4 +1,4 @@
-import Stripe from 'stripe';
+import { Stripe } from 'stripe';
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest';
 import type { Ctx } from '#api/ctx.ts';
 import * as ledger from '#api/features/ledger/service.ts';

@@ -8,7 +8,7 @@ import type { Quotation } from '#shared/survey-orders/pricing.ts';
 import type { Surveyor, SurveyorTerms } from '#shared/surveyors/contract.ts';
 import { boilerTypeIds } from '#shared/boilers/boiler-types.ts';
 import { addHours } from '#shared/time.ts';
-import { expect } from 'vitest';
+import { expect, vi } from 'vitest';
 import { givenListing, hebdenBridge } from './factories.ts';
 import type { Site, TestPerson } from './site.ts';
 
@@ -27,7 +27,14 @@ export const surveyorTerms = (overrides: Partial<SurveyorTerms> = {}): SurveyorT
   types: [...boilerTypeIds],
   materials: ['copper', 'copper-brass', 'brass', 'steel', 'stainless'],
   insuredUntilOn: '2099-12-31',
-  fees: { external: 6_000, hydraulic: 11_000, full: 18_500, thickness: 2_500, borescope: null, perKmMinor: 40 },
+  fees: {
+    external: 6_000,
+    hydraulic: 11_000,
+    full: 18_500,
+    thickness: 2_500,
+    borescope: null,
+    perKmMinor: 40,
+  },
   about: 'Second boiler tester of a club in the hills since 2015, and a toolmaker before that.',
   isTakingJobs: true,
   ...overrides,
@@ -35,14 +42,12 @@ export const surveyorTerms = (overrides: Partial<SurveyorTerms> = {}): SurveyorT
 
 /** Everything the stand-in for the payment service had to say has been said. */
 export async function noticesSent(site: Site): Promise<void> {
-  await expect
-    .poll(async () => {
-      const state = (await (await fetch(`${site.bank.url}/control/state`)).json()) as {
-        deliveries: { state: string }[];
-      };
-      return state.deliveries.filter((delivery) => delivery.state === 'waiting').length;
-    })
-    .toBe(0);
+  await vi.waitFor(async () => {
+    const state = (await (await fetch(`${site.bank.url}/control/state`)).json()) as {
+      deliveries: { state: string }[];
+    };
+    expect(state.deliveries.filter((delivery) => delivery.state === 'waiting')).toEqual([]);
+  });
 }
 
 export const bankDesk = async (site: Site, path: string): Promise<void> => {
