@@ -74,11 +74,12 @@ function Examination({ survey }: { survey: Survey }) {
       </div>
       {step?.kind === 'criterion' && (
         <p className="text-sm text-pencil">
+          No. {step.criterion.number} ·{' '}
           {steps.slice(0, place + 1).filter(({ kind }) => kind === 'criterion').length} of {count}
           {step.criterion.safetyCritical && ' · bears on the verdict'}
         </p>
       )}
-      <h1 ref={heading} tabIndex={-1} className="mb-2 text-2xl outline-hidden">
+      <h1 ref={heading} tabIndex={-1} className="mb-3 text-2xl outline-hidden">
         {title}
       </h1>
       <div className="grid gap-5">
@@ -93,7 +94,7 @@ function Examination({ survey }: { survey: Survey }) {
         )}
       </div>
       <ExamineBar
-        listHref={hrefOf(null)}
+        listHref={step === undefined ? null : hrefOf(null)}
         nextHref={next === undefined ? null : hrefOf(next.id)}
         nextLabel={nextLabel(step, next)}
         {...(step?.kind === 'criterion'

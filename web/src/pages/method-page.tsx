@@ -28,7 +28,7 @@ export function Component() {
       sub={`Method ${rubric.version}, published ${formatDay(rubric.publishedOn)}: ${String(criteria)} items in ${String(rubric.sections.length)} sections`}
     >
       <div className="grid gap-8 lg:grid-cols-[minmax(0,7fr)_minmax(0,4fr)]">
-        <div className="grid max-w-prose gap-4 text-lg leading-8">
+        <div className="grid max-w-prose content-start gap-4 text-lg leading-8">
           <p>
             Every surveyor goes through the same items in the same order, grades what was found, says how it
             was examined, and tests what the scope allows. What comes of it is worked out by the rules below
@@ -39,6 +39,13 @@ export function Component() {
             by fine paint. Beside it stand two figures. Condition says how good what was examined is; Evidence
             says how much was examined, and how surely. Neither is given without the other.
           </p>
+          <div className="mt-2 grid gap-3 text-base">
+            {method.cautions.map((caution) => (
+              <Caution key={caution} title="">
+                {caution}
+              </Caution>
+            ))}
+          </div>
         </div>
         <nav aria-label="On this page" className="self-start border-t border-ink pt-2">
           <ul>
@@ -57,13 +64,6 @@ export function Component() {
             ))}
           </ul>
         </nav>
-      </div>
-      <div className="mt-8 grid max-w-prose gap-3">
-        {method.cautions.map((caution) => (
-          <Caution key={caution} title="">
-            {caution}
-          </Caution>
-        ))}
       </div>
       <Section title="The verdict" id="verdict">
         <p className="mb-4 max-w-prose">

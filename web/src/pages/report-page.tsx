@@ -101,8 +101,11 @@ export function Component() {
           </li>
           <li>What is marked Not examined was not examined, and nothing is implied about it.</li>
           <li>
-            It was scored by the <Link to={sitePaths.method}>published method</Link>, version{' '}
-            {record.rubricVersion}; anyone can work it out again from what is recorded here.
+            It was scored by the{' '}
+            <Link className="link" to={sitePaths.method}>
+              published method
+            </Link>
+            , version {record.rubricVersion}; anyone can work it out again from what is recorded here.
           </li>
           <li>
             It is no certificate and no permission to steam. Follow your local code and your boiler inspector.

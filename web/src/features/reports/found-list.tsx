@@ -20,9 +20,11 @@ export function FoundList({ report }: { report: Report }) {
               {foundGroups[group]} <span className="font-normal text-pencil">{items.length}</span>
             </h3>
             {abouts[group] !== undefined && <p className="pt-1 text-sm text-pencil">{abouts[group]}</p>}
-            {items.map((found) => (
-              <FoundItem key={found.criterion.id} found={found} photos={report.photos} />
-            ))}
+            <div className={group === 'well' ? 'gap-x-10 lg:columns-2' : ''}>
+              {items.map((found) => (
+                <FoundItem key={found.criterion.id} found={found} photos={report.photos} />
+              ))}
+            </div>
           </section>
         ))}
     </div>

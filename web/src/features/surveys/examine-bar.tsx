@@ -1,7 +1,8 @@
 import { Link } from 'react-router-dom';
 
 interface Props {
-  listHref: string;
+  /** Null on the list itself. */
+  listHref: string | null;
   nextHref: string | null;
   nextLabel: string;
   /** Absent where there is nothing to leave out. */
@@ -19,9 +20,11 @@ export function ExamineBar({ listHref, nextHref, nextLabel, notExamined }: Props
       className="no-print fixed inset-x-0 bottom-0 z-10 border-t border-ink bg-sheet pb-[env(safe-area-inset-bottom)]"
     >
       <div className="mx-auto grid max-w-2xl auto-cols-fr grid-flow-col">
-        <Link to={listHref} className={cell}>
-          List
-        </Link>
+        {listHref !== null && (
+          <Link to={listHref} className={cell}>
+            List
+          </Link>
+        )}
         {notExamined && (
           <button
             type="button"

@@ -5,6 +5,7 @@ import { missingForFiling } from '#shared/surveys/completeness.ts';
 import type { Missing } from '#shared/surveys/completeness.ts';
 import { contradictions } from '#shared/surveys/contradictions.ts';
 import type { SurveyRecord } from '#shared/surveys/record.ts';
+import { Disclosure } from '#web/ui/disclosure.tsx';
 
 interface Props {
   survey: Pick<Survey, 'facts' | 'scope' | 'photos'>;
@@ -63,15 +64,29 @@ function Sentences({ title, about, items, hrefOf }: SentencesProps) {
     <section aria-label={title}>
       <h2>{title}</h2>
       {about !== undefined && <p className="text-pencil">{about}</p>}
-      <ul className="mt-2 border-t border-rule">
-        {items.map((item) => (
-          <li key={item.pointer + item.sentence} className="border-b border-rule">
-            <Link to={hrefOf(stepOf(item))} className="flex min-h-11 items-center py-2 hover:bg-wash">
-              <span>{item.sentence}</span>
-            </Link>
-          </li>
-        ))}
-      </ul>
+      <Rows items={items.slice(0, inSight)} hrefOf={hrefOf} />
+      {items.length > inSight && (
+        <Disclosure summary={`And ${String(items.length - inSight)} more`}>
+          <Rows items={items.slice(inSight)} hrefOf={hrefOf} />
+        </Disclosure>
+      )}
     </section>
+  );
+}
+
+/** How many are shown before the rest must be asked for. */
+const inSight = 6;
+
+function Rows({ items, hrefOf }: Pick<SentencesProps, 'items' | 'hrefOf'>) {
+  return (
+    <ul className="mt-2 border-t border-rule">
+      {items.map((item) => (
+        <li key={item.pointer + item.sentence} className="border-b border-rule last:border-b-0">
+          <Link to={hrefOf(stepOf(item))} className="flex min-h-11 items-center py-2 hover:bg-wash">
+            <span>{item.sentence}</span>
+          </Link>
+        </li>
+      ))}
+    </ul>
   );
 }
