@@ -58,6 +58,8 @@ export function fromPglite(client: PGlite, beforeClose?: () => Promise<void>): D
 /** A server by its address. */
 export function fromPostgres(url: string): Database {
   const pool = new pg.Pool({ connectionString: url, max: 10 });
+  // A connection that breaks while idle is dropped and replaced; without a listener it would end the process.
+  pool.on('error', () => undefined);
   const db = drizzleNode({ client: pool, ...options });
   return {
     db: db as unknown as Db,
