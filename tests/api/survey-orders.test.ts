@@ -16,6 +16,7 @@ import {
   payByCard,
   quotesFor,
   readOrder,
+  runJob,
 } from '#tests/support/orders.ts';
 import type { Trade } from '#tests/support/orders.ts';
 import { givenSite } from '#tests/support/site.ts';
@@ -181,18 +182,24 @@ describe('commissioning', () => {
     expect(offers.every(({ surveyor }) => /^\d{3}$/.test(surveyor.number))).toBe(true);
   });
 
-  test('a surveyor who has accepted a job for one of them within the year is not offered again', async () => {
-    const { buyer, seller, surveyor, orderId } = await givenPaidOrder(site);
-    const other = await givenListing(site, await site.givenPerson('Walter Pike'));
-    const isOffered = async () =>
-      (await quotesFor(site, buyer, other.id)).some((offer) => offer.surveyor.id === surveyor.id);
-    expect(await isOffered()).toBe(true);
+  test('a surveyor who has dealt with one of them within the year is not offered', async () => {
+    const { seller, surveyor, orderId } = await givenPaidOrder(site);
+    const isOffered = async (person: Trade['buyer'], listingId: string) =>
+      (await quotesFor(site, person, listingId)).some((offer) => offer.surveyor.id === surveyor.id);
+    // Having surveyed for them before is no dealing.
     await act(site, surveyor, orderId, 'accept').expect(200);
-    expect(await isOffered()).toBe(false);
-    const sellersOther = await givenListing(site, seller);
     const stranger = await site.givenPerson('Nan Orme');
-    const offers = await quotesFor(site, stranger, sellersOther.id);
-    expect(offers.map((offer) => offer.surveyor.id)).not.toContain(surveyor.id);
+    const sellersOther = await givenListing(site, seller);
+    expect(await isOffered(stranger, sellersOther.id)).toBe(true);
+
+    // Looking to buy from the seller is one.
+    await givenSurveyor(site, { hasPayouts: false });
+    const [offer] = await quotesFor(site, surveyor, sellersOther.id);
+    await site.as(surveyor).post('/api/survey-orders').send(commission(sellersOther.id, offer!)).expect(201);
+    const sellersThird = await givenListing(site, seller);
+    expect(await isOffered(stranger, sellersThird.id)).toBe(false);
+    const somebodyElses = await givenListing(site, await site.givenPerson('Walter Pike'));
+    expect(await isOffered(stranger, somebodyElses.id)).toBe(true);
   });
 
   test('another total than the one shown is refused, and the new one is named', async () => {
@@ -350,7 +357,9 @@ describe('at once', () => {
     );
     expect(won).toBe(1);
     expect(statuses).toEqual(new Set([200, 409]));
-    await site.drain();
+    const job = { kind: 'release-fee', data: { orderId: trade.orderId } } as const;
+    await runJob(site, job);
+    await runJob(site, job);
     const keys = (await entriesOf(trade)).map(({ what }) => what);
     expect(keys).toEqual([
       'Paid by the buyer and held',
