@@ -39,13 +39,7 @@ export function Component() {
             by fine paint. Beside it stand two figures. Condition says how good what was examined is; Evidence
             says how much was examined, and how surely. Neither is given without the other.
           </p>
-          <div className="mt-2 grid gap-3 text-base">
-            {method.cautions.map((caution) => (
-              <Caution key={caution} title="">
-                {caution}
-              </Caution>
-            ))}
-          </div>
+          <Caution title={method.cautions[0] ?? ''}>{method.cautions.slice(1).join(' ')}</Caution>
         </div>
         <nav aria-label="On this page" className="self-start border-t border-ink pt-2">
           <ul>

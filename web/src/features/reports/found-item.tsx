@@ -30,7 +30,7 @@ export function FoundItem({ found, photos }: { found: Found; photos: readonly Ph
       id={foundId(criterion.id)}
       className="scroll-mt-6 break-inside-avoid border-b border-rule py-4 target:bg-wash"
     >
-      <div className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">
+      <div className="flex flex-wrap items-start justify-between gap-x-6 gap-y-1">
         <h4 className="font-medium">
           <span className="mr-3 inline-block min-w-6 text-pencil">{criterion.number}</span>
           {criterion.title}

@@ -11,7 +11,7 @@ export function InstrumentsTable({ record }: { record: SurveyRecord }) {
   if (record.instruments.length === 0) return <p>None recorded.</p>;
   return (
     <Table
-      caption="Instruments"
+      caption="Instruments and their calibration"
       isCaptionHidden
       rows={record.instruments}
       keyOf={(_instrument, index) => String(index)}

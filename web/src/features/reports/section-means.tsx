@@ -8,7 +8,7 @@ const orDash = (value: number | null, unit = ''): string =>
 export function SectionMeans({ sections }: { sections: readonly SectionScore[] }) {
   return (
     <Table
-      caption="Section by section"
+      caption="Condition and Evidence of each section"
       isCaptionHidden
       rows={sections}
       keyOf={({ id }) => id}

@@ -9,7 +9,7 @@ import { Table } from '#web/ui/table.tsx';
 type Tested = Pick<Report, 'record' | 'scope' | 'result'>;
 
 const orDash = (value: number | null, unit: string): string =>
-  value === null ? '–' : `${String(value)} ${unit}`;
+  value === null ? '–' : `${String(value)}\u00A0${unit}`;
 const yesNo = (value: boolean | null): string => (value === null ? 'Not tried' : value ? 'Yes' : 'No');
 
 /** The cold water test as it was made: what was wanted, what was read, and what leaked. */

@@ -21,7 +21,7 @@ export function DefectDetails({ spec, defect, band, onChange }: Props) {
   const remedy = defect.remedy ?? spec.remedy;
   return (
     <section className="border-l-4 border-ink pl-3" aria-label={spec.label}>
-      <h3>{spec.label}</h3>
+      <p className="font-bold">{spec.label}</p>
       <p className="text-[0.9375rem] leading-6 text-pencil">
         Usually {grades[spec.grade].toLowerCase()} · {remedies[remedy].toLowerCase()} ·{' '}
         {bandText(defect.allowance ?? band)}

@@ -38,7 +38,7 @@ export function FindingPhotos({ orderId, criterion, finding, photos, uploads, ph
   };
   return (
     <section className="grid gap-2" aria-label="Photographs">
-      <h3>Photographs</h3>
+      <h2 className="text-lg">Photographs</h2>
       <p className="text-sm leading-5 text-pencil">
         Wanted: {criterion.photosWanted.join('; ').toLowerCase()}.
       </p>
@@ -119,9 +119,11 @@ function Sending({ upload, photoUploads }: { upload: PhotoUpload; photoUploads: 
       {upload.problem !== null && (
         <div role="alert">
           <p className="text-sm leading-5 text-unfit">{upload.problem}</p>
-          <Button kind="plain" onClick={() => void photoUploads.retry(upload.id)}>
-            Try again
-          </Button>
+          {upload.canRetry && (
+            <Button kind="plain" onClick={() => void photoUploads.retry(upload.id)}>
+              Try again
+            </Button>
+          )}
           <Button kind="plain" onClick={() => void photoUploads.remove(upload.id)}>
             Leave it out
           </Button>

@@ -55,7 +55,7 @@ export function FindingScreen({ survey, criterion, record, uploads, photoUploads
             edit(setGrade(criterion.id, next));
           }}
         />
-        <div className="flex flex-wrap gap-2">
+        <div className="-ml-4 flex flex-wrap">
           <Button
             kind="plain"
             aria-pressed={grade === 'notFitted'}

@@ -23,7 +23,7 @@ export function LeakFields({
   };
   return (
     <section className="grid gap-3" aria-label="Leaks">
-      <h3>Leaks</h3>
+      <h2 className="text-lg">Leaks</h2>
       {leaks.length === 0 && <p className="text-pencil">None recorded: dry all over.</p>}
       {leaks.map((leak, index) => (
         // A leak has no name but its place in the list.

@@ -22,7 +22,7 @@ export function MeasurementFields({ criterion, finding, edit }: Props) {
   if (criterion.measurements.length === 0) return null;
   return (
     <section className="grid gap-4" aria-label="Measurements">
-      <h3>Measurements</h3>
+      <h2 className="text-lg">Measurements</h2>
       {own.map((spec) => (
         <OneQuantity
           key={spec.quantity}

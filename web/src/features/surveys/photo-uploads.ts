@@ -11,6 +11,8 @@ export interface PhotoUpload {
   progress: number;
   /** Why it stopped; null while it is being sent. */
   problem: string | null;
+  /** Whether the same file might do better later: one that was refused will be refused again. */
+  canRetry: boolean;
 }
 
 interface Options {
@@ -22,19 +24,24 @@ const partBytes = 2 * 1024 * 1024;
 const unreachable =
   'The photograph could not be sent: the server cannot be reached. It is kept on this page; try again when there is a signal.';
 
-/** What the server said of a file it would not take. */
-function readRefusal(error: unknown): string {
+/** What the server said of a file it would not take, or that it could not be asked. */
+function readRefusal(error: unknown): Pick<PhotoUpload, 'problem' | 'canRetry'> {
   const response =
     typeof error === 'object' && error !== null && 'originalResponse' in error
       ? (error.originalResponse as { getBody: () => string } | null)
       : null;
-  if (!response) return unreachable;
+  if (!response) return { problem: unreachable, canRetry: true };
   try {
-    return Problem.fromDetails(JSON.parse(response.getBody())).message;
+    const problem = Problem.fromDetails(JSON.parse(response.getBody()));
+    return { problem: problem.message, canRetry: problem.status >= 500 };
   } catch {
-    return unreachable;
+    return { problem: unreachable, canRetry: true };
   }
 }
+
+const nothing = () => undefined;
+/** Refusals are shown beside the photograph; the console is for faults. */
+const silent = { debug: nothing, warn: nothing, error: nothing };
 
 /** Sends photographs in parts that resume, several to a finding, and keeps those that failed to be tried again. */
 export function createPhotoUploads({ orderId, onArrived }: Options) {
@@ -59,7 +66,10 @@ export function createPhotoUploads({ orderId, onArrived }: Options) {
       import('@uppy/core'),
       import('@uppy/tus'),
     ]);
-    const uppy = new Uppy<{ criterionId: string }, { xhr: XMLHttpRequest }>({ autoProceed: true });
+    const uppy = new Uppy<{ criterionId: string }, { xhr: XMLHttpRequest }>({
+      autoProceed: true,
+      logger: silent,
+    });
     uppy.use(Tus, {
       endpoint: '/api/files',
       chunkSize: partBytes,
@@ -77,10 +87,13 @@ export function createPhotoUploads({ orderId, onArrived }: Options) {
       if (!file || photoId === undefined) return;
       onArrived(file.meta.criterionId, photoId);
       drop(file.id);
-      uppy.removeFile(file.id);
+      // Later: a file removed while its success is still being told is taken for one given up, and deleted.
+      queueMicrotask(() => {
+        uppy.removeFile(file.id);
+      });
     });
     uppy.on('upload-error', (file, error) => {
-      if (file) change(file.id, { problem: readRefusal(error) });
+      if (file) change(file.id, readRefusal(error));
     });
     return uppy;
   };
@@ -109,7 +122,7 @@ export function createPhotoUploads({ orderId, onArrived }: Options) {
           filename: file.name,
         };
         const previewUrl = URL.createObjectURL(file);
-        const shown = { criterionId, name: file.name, previewUrl, progress: 0 };
+        const shown = { criterionId, name: file.name, previewUrl, progress: 0, canRetry: false };
         if (file.size > uploadLimits.photoBytes) {
           const problem = `${file.name} is over ${String(uploadLimits.photoBytes / 1024 / 1024)} MB. Take it at a lower quality.`;
           set([...uploads, { ...shown, id: name, problem }]);

@@ -60,7 +60,7 @@ export function ReadingsTable({ readings, from, onChange }: Props) {
   return (
     <section className="grid gap-3" aria-label="Readings">
       <div className="flex flex-wrap items-center justify-between gap-2">
-        <h3>Readings</h3>
+        <h2 className="text-lg">Readings</h2>
         <Button kind="quiet" onClick={clock.start}>
           {clock.isRunning ? `${clock.minutes.toFixed(1)} min: start again` : 'Start the clock'}
         </Button>
@@ -102,6 +102,9 @@ export function ReadingsTable({ readings, from, onChange }: Props) {
           </tbody>
         </table>
       )}
+      <p className="text-sm leading-5 text-pencil">
+        Minutes count from {from}. With the clock running, leave the minute empty and it is read off for you.
+      </p>
       <div className="grid grid-cols-2 items-start gap-3" key={count}>
         <FigureInput
           label="Pressure"
@@ -111,15 +114,7 @@ export function ReadingsTable({ readings, from, onChange }: Props) {
           value={pressurePa}
           onChange={setPressurePa}
         />
-        <FigureInput
-          label="Minute"
-          unit="min"
-          min={0}
-          max={600}
-          hint={clock.isRunning ? 'Empty: by the clock' : `From ${from}`}
-          value={minute}
-          onChange={setMinute}
-        />
+        <FigureInput label="Minute" unit="min" min={0} max={600} value={minute} onChange={setMinute} />
       </div>
       <Button
         kind="quiet"

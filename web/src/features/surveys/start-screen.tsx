@@ -69,7 +69,7 @@ export function StartScreen({ record, today, edit }: Props) {
       )}
       <section className="grid gap-4" aria-label="Instruments">
         <div>
-          <h3>Instruments</h3>
+          <h2 className="text-lg">Instruments</h2>
           <p className="text-[0.9375rem] leading-6 text-pencil">
             A test counts for half with an instrument out of calibration, and the verdict becomes Not proven.
           </p>
@@ -153,7 +153,7 @@ function InstrumentFields({ instrument, examinedOn, onChange, onRemove }: Fields
           onChange({ name: value });
         }}
       />
-      <div className="grid grid-cols-2 gap-3">
+      <div className="grid grid-cols-[minmax(0,2fr)_minmax(0,3fr)] gap-3">
         <WordsInput
           label="Number"
           most={60}

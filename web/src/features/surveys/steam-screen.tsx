@@ -24,14 +24,10 @@ export function SteamScreen({ facts, record, edit }: Props) {
   return (
     <div className="grid gap-6">
       <Caution title="Eyes covered, and nobody in line with a fitting.">
-        Fire out of doors or with the doors open. A boiler that failed its hydraulic test is not lit. Follow
-        your local code and your boiler inspector.
+        A boiler that failed its hydraulic test is not lit. Follow your local code and your boiler inspector.
+        {facts.firing !== 'electric' &&
+          ' Fire out of doors or with the doors open, with a carbon monoxide meter at your face: it cannot be smelt. If it sounds, shut off the fuel and leave.'}
       </Caution>
-      {facts.firing !== 'electric' && (
-        <Caution title="Carbon monoxide cannot be smelt.">
-          Have the meter running at the operator’s face. If it sounds, shut off the fuel and leave.
-        </Caution>
-      )}
       {test === null ? (
         <>
           <Button
@@ -100,7 +96,7 @@ function TestFields({ facts, test, onChange, onRemove }: TestProps) {
       />
       <section className="grid gap-4" aria-label="Safety valve">
         <div>
-          <h3>Safety valve</h3>
+          <h2 className="text-lg">Safety valve</h2>
           <p className="text-[0.9375rem] leading-6 text-pencil">
             It must lift, and hold the pressure with full fire and everything shut, by{' '}
             {show('pressure', mostPa)}: a tenth above working pressure.
@@ -132,7 +128,7 @@ function TestFields({ facts, test, onChange, onRemove }: TestProps) {
         />
       </section>
       <section className="grid gap-4" aria-label="Water gauge and feed">
-        <h3>Water gauge and feed</h3>
+        <h2 className="text-lg">Water gauge and feed</h2>
         <Check
           label="Water gauge blown through under steam"
           checked={test.gaugeBlownThrough}
@@ -166,7 +162,7 @@ function TestFields({ facts, test, onChange, onRemove }: TestProps) {
         />
       </section>
       <section className="grid gap-4" aria-label="Fire">
-        <h3>Fire</h3>
+        <h2 className="text-lg">Fire</h2>
         <YesNo
           label="Flame settled"
           value={test.flameSettled}
