@@ -4,6 +4,7 @@ import type { Instant } from '#shared/time.ts';
 import type { Db } from './db/client.ts';
 import type { Queue } from './jobs/queue.ts';
 import type { FileStore } from './services/files/index.ts';
+import type { Log } from './log.ts';
 import type { Mailer } from './services/mail/index.ts';
 import type { Payments } from './services/payments/index.ts';
 
@@ -17,12 +18,7 @@ export interface Actor {
   readonly sessionId: string;
 }
 
-export interface Log {
-  debug: (fields: object, message: string) => void;
-  info: (fields: object, message: string) => void;
-  warn: (fields: object, message: string) => void;
-  error: (fields: object, message: string) => void;
-}
+export type { Log } from './log.ts';
 
 /** Everything a service may reach, handed in: nothing is imported that has a state of its own. */
 export interface Ctx {

@@ -1,7 +1,7 @@
 import { sql } from 'drizzle-orm';
 import PgBoss from 'pg-boss';
 import type { Instant } from '#shared/time.ts';
-import type { Ctx, Log } from '../ctx.ts';
+import type { Log } from '../log.ts';
 import type { Database, Db } from '../db/client.ts';
 import type { Job, JobKind, Jobs } from './jobs.ts';
 
@@ -12,12 +12,7 @@ const keepDays = 400;
 
 export interface Queue {
   /** Promises a job in the caller's own transaction: it exists if and only if the transaction commits. */
-  enqueue: <K extends JobKind>(
-    ctx: Pick<Ctx, 'db'>,
-    kind: K,
-    data: Jobs[K],
-    runAt?: Instant,
-  ) => Promise<void>;
+  enqueue: <K extends JobKind>(ctx: { db: Db }, kind: K, data: Jobs[K], runAt?: Instant) => Promise<void>;
   /** Runs jobs as they fall due, until `stop`. */
   work: (handle: (job: Job) => Promise<void>) => Promise<void>;
   /** Runs what is due now, once each, until nothing is left. For tests and the seed. */

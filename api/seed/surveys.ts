@@ -5,6 +5,31 @@ export const surveys: Record<string, SeedSurvey> = {
   'return-flue': {
     scope: 'full',
     findings: {
+      'shell.barrel': { grade: 'sound', measurements: [{ quantity: 'thinnestMm', value: 2.58 }] },
+      'shell.joints': {
+        grade: 'sound',
+        measurements: [{ quantity: 'jointMaterial', value: 'silver-solder' }],
+      },
+      'safety.gauge': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'fullScalePa', value: 1100000 },
+          { quantity: 'zeroErrorPa', value: 0 },
+          { quantity: 'midPointErrorPa', value: 3_000 },
+          { quantity: 'workingPointErrorPa', value: 5_000 },
+          { quantity: 'siphonFitted', value: true },
+          { quantity: 'redLine', value: true },
+        ],
+      },
+      'safety.capacity': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'valveBoreMm', value: 6.5 },
+          { quantity: 'valveLift', value: 'high' },
+          { quantity: 'valvesFitted', value: 1 },
+        ],
+      },
+      'safety.glass': { grade: 'sound', measurements: [{ quantity: 'lowestLevelAboveCrownMm', value: 9 }] },
       'casing.finish': { grade: 'serviceable', defects: [{ code: 'finish-tarnished', note: 'Honest use.' }] },
       'safety.valve': { grade: 'sound', note: 'Both valves tried, second lifts 3 psi above the first.' },
       'shell.fireside': { grade: 'serviceable', note: 'Light soot in the return tubes, brushes out.' },
@@ -23,6 +48,30 @@ export const surveys: Record<string, SeedSurvey> = {
   'twelve-tube': {
     scope: 'full',
     findings: {
+      'shell.barrel': { grade: 'sound', measurements: [{ quantity: 'thinnestMm', value: 1.96 }] },
+      'shell.joints': {
+        grade: 'sound',
+        measurements: [{ quantity: 'jointMaterial', value: 'silver-solder' }],
+      },
+      'safety.gauge': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'fullScalePa', value: 1000000 },
+          { quantity: 'zeroErrorPa', value: 0 },
+          { quantity: 'midPointErrorPa', value: 3_000 },
+          { quantity: 'workingPointErrorPa', value: 5_000 },
+          { quantity: 'siphonFitted', value: true },
+          { quantity: 'redLine', value: true },
+        ],
+      },
+      'safety.capacity': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'valveBoreMm', value: 5.5 },
+          { quantity: 'valveLift', value: 'high' },
+          { quantity: 'valvesFitted', value: 1 },
+        ],
+      },
       'safety.glass': {
         grade: 'attention',
         defects: [
@@ -98,6 +147,12 @@ export const surveys: Record<string, SeedSurvey> = {
         { file: 'g2-horizontal-gas-boiler-burner-end', alt: 'Burner end with its hose, as found.' },
       ],
       'firing.flame': [{ file: 'k06-burner-head-soot-corrosion', alt: 'Burner head, sooted and corroded.' }],
+      'firing.draught': [
+        {
+          file: 'g1-horizontal-gas-boiler-threequarter',
+          alt: 'Chimney end, where the soot bridge was found.',
+        },
+      ],
       'safety.valve': [{ file: 'k05-safety-valve-verdigris', alt: 'Verdigris round the safety valve.' }],
     },
     hydraulic: { firstTest: true, heldPa: 852_000, fellPa: 5_000 },
@@ -117,6 +172,7 @@ export const surveys: Record<string, SeedSurvey> = {
       'identity.papers': {
         grade: 'attention',
         defects: [{ code: 'papers-hydraulic-due', note: 'Last paper is of 1999.' }],
+        measurements: [{ quantity: 'lastHydraulicOn', value: '17 April 1999' }],
       },
       'shell.waterside': {
         grade: 'serviceable',
@@ -144,8 +200,16 @@ export const surveys: Record<string, SeedSurvey> = {
   'green-vertical': {
     scope: 'hydraulic',
     findings: {
+      'shell.joints': {
+        grade: 'sound',
+        measurements: [{ quantity: 'jointMaterial', value: 'silver-solder' }],
+      },
       'identity.papers': { grade: 'attention', defects: [{ code: 'papers-none' }] },
-      'identity.drawing': { grade: 'attention', defects: [{ code: 'drawing-none' }] },
+      'identity.drawing': {
+        grade: 'attention',
+        defects: [{ code: 'drawing-none' }],
+        measurements: [{ quantity: 'designName', value: 'None known' }],
+      },
       'feed.first': {
         grade: 'serviceable',
         defects: [{ code: 'first-gland', note: 'Drips at the gland; repack.' }],

@@ -4,7 +4,7 @@ import type { BoilerTypeId } from '#shared/boilers/boiler-types.ts';
 import type { SurveyorTerms } from '#shared/surveyors/contract.ts';
 import type { Instant } from '#shared/time.ts';
 import type { Db } from '../../db/client.ts';
-import { reports, surveyOrderEvents, surveyOrders, surveyors, user } from '../../db/schema/index.ts';
+import { reports, surveyOrders, surveyors, user } from '../../db/schema/index.ts';
 
 export interface StoredSurveyor {
   userId: string;
@@ -87,31 +87,29 @@ export async function countReports(db: Db, userIds: readonly string[]): Promise<
   return new Map(rows.map((row) => [row.userId, row.filed]));
 }
 
-/** For each surveyor, those of the people named with whom a job was accepted since; what became of it does not matter. */
+/**
+ * For each person who has bought or sold, those of the people named whom they faced across a sale since then. Having
+ * surveyed for somebody before is no dealing: the fee came from the same side, and the method is the same.
+ */
 export async function listDealings(
   db: Db,
   people: readonly string[],
   since: Instant,
 ): Promise<Map<string, Set<string>>> {
   const rows = await db
-    .select({
-      surveyorId: surveyOrders.surveyorId,
-      buyerId: surveyOrders.buyerId,
-      sellerId: surveyOrders.sellerId,
-    })
-    .from(surveyOrderEvents)
-    .innerJoin(surveyOrders, eq(surveyOrders.id, surveyOrderEvents.orderId))
+    .select({ buyerId: surveyOrders.buyerId, sellerId: surveyOrders.sellerId })
+    .from(surveyOrders)
     .where(
       and(
-        eq(surveyOrderEvents.event, 'accept'),
-        gte(surveyOrderEvents.at, new Date(since)),
+        gte(surveyOrders.placedAt, new Date(since)),
         or(inArray(surveyOrders.buyerId, [...people]), inArray(surveyOrders.sellerId, [...people])),
       ),
     );
   const dealings = new Map<string, Set<string>>();
-  for (const { surveyorId, buyerId, sellerId } of rows) {
-    const met = dealings.get(surveyorId) ?? new Set();
-    dealings.set(surveyorId, met.add(buyerId).add(sellerId));
+  const note = (one: string, other: string) => dealings.set(one, (dealings.get(one) ?? new Set()).add(other));
+  for (const { buyerId, sellerId } of rows) {
+    note(buyerId, sellerId);
+    note(sellerId, buyerId);
   }
   return dealings;
 }

@@ -113,7 +113,7 @@ export async function getSurveyor(ctx: Ctx, userId: string): Promise<Surveyor> {
   return surveyor;
 }
 
-/** Days in which having worked for somebody makes a surveyor less than independent of them. */
+/** Days in which having bought from or sold to somebody makes a surveyor less than independent of them. */
 const dealingsDays = 365;
 
 /** Every surveyor, with what decides whether they may take a job there for these people. */

@@ -93,3 +93,18 @@ export function useStartTotp() {
       authCall<{ totpURI: string; backupCodes: string[] }>('POST', '/two-factor/enable', body),
   });
 }
+
+/** Confirms an address by the token of its letter; asked once. */
+export const verificationQuery = (token: string) =>
+  queryOptions({
+    queryKey: [...accountQueries.all, 'verification', token] as const,
+    queryFn: () => authCall<object>('GET', `/verify-email?token=${encodeURIComponent(token)}`),
+    retry: false,
+    staleTime: Infinity,
+  });
+
+export function useResendVerification() {
+  return useMutation({
+    mutationFn: (body: { email: string }) => authCall<object>('POST', '/send-verification-email', body),
+  });
+}
