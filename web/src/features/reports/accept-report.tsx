@@ -1,7 +1,7 @@
+import { useAcceptReport } from '#web/features/survey-orders/queries.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { Button } from '#web/ui/button.tsx';
 import { Notice } from '#web/ui/notes.tsx';
-import { useAcceptReport } from './queries.ts';
 
 /** For the buyer, while the report is in review. */
 export function AcceptReport({ orderId }: { orderId: string }) {
@@ -21,7 +21,7 @@ export function AcceptReport({ orderId }: { orderId: string }) {
         <Button
           isPending={accept.isPending}
           onClick={() => {
-            accept.mutate();
+            accept.mutate({});
           }}
         >
           Accept the report

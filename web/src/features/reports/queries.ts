@@ -1,5 +1,4 @@
-import { queryOptions, useMutation } from '@tanstack/react-query';
-import { acceptReport } from '#shared/survey-orders/contract.ts';
+import { queryOptions } from '@tanstack/react-query';
 import { checkReport, getReport } from '#shared/surveys/contract.ts';
 import { call } from '#web/lib/api.ts';
 
@@ -19,11 +18,3 @@ export const reportQueries = {
       gcTime: 0,
     }),
 };
-
-/** The buyer has read the report; the fee goes to the surveyor. */
-export function useAcceptReport(orderId: string) {
-  return useMutation({
-    mutationFn: () => call(acceptReport, { params: { id: orderId } }),
-    onSuccess: (_order, _input, _context, { client }) => client.invalidateQueries(),
-  });
-}
