@@ -1,6 +1,6 @@
-import { useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
-import { useState } from 'react';
-import { useParams } from 'react-router-dom';
+import { keepPreviousData, useQuery, useSuspenseQuery } from '@tanstack/react-query';
+import { useRef, useState } from 'react';
+import { Link, useParams } from 'react-router-dom';
 import { Problem } from '#shared/problem.ts';
 import { sitePaths } from '#shared/site-paths.ts';
 import { orderClocks } from '#shared/survey-orders/machine.ts';
@@ -9,13 +9,13 @@ import type { ExtraId, ScopeId } from '#shared/surveys/scopes.ts';
 import { useSignedIn } from '#web/features/accounts/use-me.ts';
 import { listingQueries } from '#web/features/listings/queries.ts';
 import { Offers } from '#web/features/survey-orders/offers.tsx';
-import type { Offer } from '#web/features/survey-orders/offers.tsx';
 import { surveyOrderQueries, usePlaceSurveyOrder } from '#web/features/survey-orders/queries.ts';
 import { QuotationTable } from '#web/features/survey-orders/quotation-table.tsx';
-import { formatMoney } from '#web/lib/format.ts';
+import { formatSum } from '#web/lib/format.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { Button, ButtonLink } from '#web/ui/button.tsx';
 import { Check, Choices } from '#web/ui/check.tsx';
+import { Loading } from '#web/ui/mark.tsx';
 import { Caution, Notice } from '#web/ui/notes.tsx';
 import { Page, Section } from '#web/ui/page.tsx';
 
@@ -47,27 +47,47 @@ function Terms() {
   );
 }
 
+function Refusal({ error }: { error: Error }) {
+  return (
+    <Notice kind="bad">
+      {messageOf(error)}
+      {error instanceof Problem && error.slug === 'wrong-state' && (
+        <>
+          {' '}
+          <Link className="link" to={sitePaths.surveys}>
+            My surveys
+          </Link>
+        </>
+      )}
+    </Notice>
+  );
+}
+
 export function Component() {
   const me = useSignedIn();
   const { slug = '' } = useParams();
-  const client = useQueryClient();
   const { data: listing } = useSuspenseQuery(listingQueries.detail(slug));
   const [scope, setScope] = useState<ScopeId>('full');
   const [extras, setExtras] = useState<ExtraId[]>([]);
-  const [offer, setOffer] = useState<Offer>();
+  const [surveyorId, setSurveyorId] = useState<string | null>(null);
   const [isAsked, setIsAsked] = useState(false);
   const [mustAsk, setMustAsk] = useState(false);
+  const request = useRef<HTMLInputElement>(null);
   const place = usePlaceSurveyOrder();
+  const quotes = useQuery({
+    ...surveyOrderQueries.quotes(listing.id, { scope, extras }),
+    placeholderData: keepPreviousData,
+  });
+  // Prices shown while new ones are on their way are not to be paid.
+  const offer = quotes.isPlaceholderData
+    ? undefined
+    : quotes.data?.items.find(({ surveyor }) => surveyor.id === surveyorId);
 
-  const choose = (change: () => void) => {
-    change();
-    setOffer(undefined);
-    place.reset();
-  };
   const pay = () => {
     if (!offer) return;
     if (!isAsked) {
       setMustAsk(true);
+      request.current?.focus();
       return;
     }
     place.mutate(
@@ -84,11 +104,8 @@ export function Component() {
           window.location.assign(checkoutUrl);
         },
         onError: (error) => {
-          // The price or the surveyor is no longer as shown: ask again before anything is paid.
-          if (error instanceof Problem && error.slug === 'invalid-input') {
-            setOffer(undefined);
-            void client.invalidateQueries({ queryKey: surveyOrderQueries.all });
-          }
+          // The price or the surveyor is no longer as shown: show how it is now, and ask again.
+          if (error instanceof Problem && error.slug === 'invalid-input') void quotes.refetch();
         },
       },
     );
@@ -133,9 +150,8 @@ export function Component() {
           value={scope}
           options={scopeOptions}
           onChange={(next) => {
-            choose(() => {
-              setScope(next);
-            });
+            place.reset();
+            setScope(next);
           }}
         />
         <h3 className="mt-6 mb-1">Besides</h3>
@@ -146,31 +162,38 @@ export function Component() {
             hint={extraWords[id].covers}
             checked={extras.includes(id)}
             onChange={(event) => {
-              const isOn = event.target.checked;
-              choose(() => {
-                setExtras(isOn ? [...extras, id].toSorted() : extras.filter((each) => each !== id));
-              });
+              place.reset();
+              setExtras(
+                event.target.checked ? [...extras, id].toSorted() : extras.filter((each) => each !== id),
+              );
             }}
           />
         ))}
       </Section>
       <Section title="By whom">
-        <Offers
-          listingId={listing.id}
-          scope={scope}
-          extras={extras}
-          chosen={offer?.surveyor.id ?? null}
-          onChoose={(next) => {
-            place.reset();
-            setOffer(next);
-          }}
-        />
+        {quotes.isPending && <Loading what="Asking who could come" />}
+        {quotes.error && (
+          <Notice kind="bad">
+            {messageOf(quotes.error)}{' '}
+            <Button kind="plain" onClick={() => void quotes.refetch()}>
+              Try again
+            </Button>
+          </Notice>
+        )}
+        {quotes.data && (
+          <div aria-busy={quotes.isPlaceholderData} className={quotes.isPlaceholderData ? 'opacity-60' : ''}>
+            <Offers
+              offers={quotes.data.items}
+              chosen={surveyorId}
+              onChoose={(id) => {
+                place.reset();
+                setSurveyorId(id);
+              }}
+            />
+          </div>
+        )}
       </Section>
-      {place.isError && (
-        <div className="mt-6">
-          <Notice kind="bad">{messageOf(place.error)}</Notice>
-        </div>
-      )}
+      {place.isError && !offer && <Refusal error={place.error} />}
       {offer && (
         <Section title="What it costs">
           <QuotationTable quotation={offer.quotation} />
@@ -181,6 +204,7 @@ export function Component() {
               label="Please begin as soon as can be arranged"
               hint="A contract made at a distance may be cancelled for fourteen days. I ask for the work to begin within them, and know that once the report is filed I can no longer cancel."
               checked={isAsked}
+              ref={request}
               error={mustAsk && !isAsked ? 'Ask for the work to begin, or wait fourteen days' : undefined}
               onChange={(event) => {
                 setIsAsked(event.target.checked);
@@ -191,8 +215,9 @@ export function Component() {
             <Caution title="Nobody is to light this boiler for you before the surveyor comes.">
               A photograph under steam proves nothing and may hurt somebody.
             </Caution>
+            {place.isError && <Refusal error={place.error} />}
             <Button isPending={place.isPending} disabled={!me.emailVerified} onClick={pay}>
-              Pay {formatMoney(offer.quotation.total)} on the card page
+              Pay {formatSum(offer.quotation.total)} on the card page
             </Button>
           </div>
         </Section>

@@ -14,7 +14,11 @@ import { formatFromNow, formatInstant } from '#web/lib/format.ts';
 import { KeyFigures } from '#web/ui/figures.tsx';
 import { Notice } from '#web/ui/notes.tsx';
 import { Page, Section } from '#web/ui/page.tsx';
+import { Photo } from '#web/ui/photo.tsx';
 import { Timeline } from '#web/ui/timeline.tsx';
+
+/** Before the boiler is examined, where it stands is what the page is for. */
+const isAhead = ({ status }: SurveyOrder): boolean => status === 'arranged' || status === 'examining';
 
 function Visit({ order }: { order: SurveyOrder }) {
   if (order.appointmentAt === null) return null;
@@ -34,11 +38,13 @@ function Visit({ order }: { order: SurveyOrder }) {
           In {order.listing.town.name}. The address is between seller and surveyor.
         </p>
       )}
-      <p className="mt-3">
-        <a className="link" href={`/api/survey-orders/${order.id}/calendar.ics`} download>
-          Put it in my calendar
-        </a>
-      </p>
+      {order.status === 'arranged' && (
+        <p className="mt-3">
+          <a className="link" href={`/api/survey-orders/${order.id}/calendar.ics`} download>
+            Put it in my calendar
+          </a>
+        </p>
+      )}
     </Section>
   );
 }
@@ -49,7 +55,8 @@ export function Component() {
   const [search] = useSearchParams();
   const { data: order } = useSuspenseQuery({ ...surveyOrderQueries.detail(id), refetchInterval: 20_000 });
   const { listing, surveyor, dueAt } = order;
-  const isBack = search.get('paid') !== null && order.status === 'awaiting-payment' && order.part === 'buyer';
+  const isUnpaid = order.status === 'awaiting-payment' && order.part === 'buyer';
+  const isBack = search.get('paid') === 'yes' && isUnpaid;
   return (
     <Page
       title={listing.title}
@@ -71,15 +78,40 @@ export function Component() {
               </p>
             )}
           </div>
-          {search.get('paid') !== null && order.status === 'awaiting-surveyor' && (
+          {search.get('paid') === 'yes' && order.status === 'awaiting-surveyor' && (
             <div className="mb-6">
               <Notice kind="good">Paid, and held. The surveyor has been asked.</Notice>
             </div>
           )}
+          {search.get('paid') === 'no' && isUnpaid && (
+            <div className="mb-6">
+              <Notice>You came back without paying. Nothing has been charged.</Notice>
+            </div>
+          )}
+          {isAhead(order) && (
+            <div className="mb-8">
+              <Visit order={order} />
+            </div>
+          )}
           {isBack ? <WaitingForPayment order={order} /> : <OrderActions order={order} />}
-          <Visit order={order} />
+          {!isAhead(order) && <Visit order={order} />}
+          <Section title="Record">
+            <Timeline
+              items={order.record.map(({ event, label, at, by, reason }, index) => ({
+                id: `${event}${at}${String(index)}`,
+                when: formatInstant(at),
+                what: label,
+                more: [by, reason].filter(Boolean).join(': '),
+              }))}
+            />
+          </Section>
         </div>
         <div>
+          {listing.cover && (
+            <div className="mb-8">
+              <Photo photo={listing.cover} sizes="(min-width: 64rem) 28rem, 100vw" shape="4/3" isFirst />
+            </div>
+          )}
           <Section title="The order">
             <KeyFigures
               columns={1}
@@ -96,19 +128,9 @@ export function Component() {
           </Section>
           {order.quotation && (
             <Section title="Price">
-              <QuotationTable quotation={order.quotation} />
+              <QuotationTable quotation={order.quotation} hasSurveyorPart={order.part !== 'buyer'} />
             </Section>
           )}
-          <Section title="Record">
-            <Timeline
-              items={order.record.map(({ event, label, at, by, reason }, index) => ({
-                id: `${event}${at}${String(index)}`,
-                when: formatInstant(at),
-                what: label,
-                more: [by, reason].filter(Boolean).join(': '),
-              }))}
-            />
-          </Section>
         </div>
       </div>
     </Page>

@@ -5,10 +5,11 @@ import { scopes } from '#shared/surveys/scopes.ts';
 import { sitePaths } from '#shared/site-paths.ts';
 import { useSignedIn } from '#web/features/accounts/use-me.ts';
 import { surveyOrderQueries } from '#web/features/survey-orders/queries.ts';
-import { formatInstant } from '#web/lib/format.ts';
+import { formatFromNow, formatInstant } from '#web/lib/format.ts';
 import { ButtonLink } from '#web/ui/button.tsx';
 import { Empty } from '#web/ui/notes.tsx';
 import { Page } from '#web/ui/page.tsx';
+import { Photo } from '#web/ui/photo.tsx';
 
 const parts = {
   buyer: 'You are the buyer',
@@ -45,8 +46,11 @@ export function Component() {
           {data.items.map((order) => (
             <li
               key={order.id}
-              className="relative grid gap-x-8 gap-y-1 py-4 sm:grid-cols-[minmax(0,5fr)_minmax(0,4fr)_auto]"
+              className="relative grid gap-x-8 gap-y-1 py-4 sm:grid-cols-[4.5rem_minmax(0,5fr)_minmax(0,4fr)_11rem]"
             >
+              <div className="hidden sm:block">
+                {order.listing.cover && <Photo photo={order.listing.cover} sizes="72px" shape="1/1" />}
+              </div>
               <div>
                 <h2 className="text-lg">
                   <Link className="after:absolute after:inset-0" to={sitePaths.order(order.id)}>
@@ -62,6 +66,9 @@ export function Component() {
                 {order.appointmentAt === null
                   ? `Placed ${formatInstant(order.placedAt)}`
                   : `Visit ${formatInstant(order.appointmentAt)}`}
+                {order.dueAt !== null && (
+                  <span className="block font-medium text-attention">Due {formatFromNow(order.dueAt)}</span>
+                )}
               </p>
             </li>
           ))}

@@ -1,3 +1,4 @@
+import { useId } from 'react';
 import type { ComponentProps, ReactNode } from 'react';
 
 type InputProps = Omit<ComponentProps<'input'>, 'className' | 'type'>;
@@ -15,16 +16,27 @@ export function Check({
   error?: string | undefined;
   kind?: 'checkbox' | 'radio';
 }) {
+  const id = useId();
   return (
     <div>
       <label className="flex min-h-11 items-start gap-3 py-2">
-        <input {...input} type={kind} className="tick mt-0.5" aria-invalid={Boolean(error)} />
+        <input
+          {...input}
+          type={kind}
+          className="tick mt-0.5"
+          aria-invalid={Boolean(error)}
+          aria-describedby={error ? `${id}-error` : undefined}
+        />
         <span>
           {label}
           {hint && <span className="block text-sm leading-5 text-pencil">{hint}</span>}
         </span>
       </label>
-      {error && <p className="text-sm font-medium text-unfit">{error}</p>}
+      {error && (
+        <p id={`${id}-error`} className="text-sm font-medium text-unfit">
+          {error}
+        </p>
+      )}
     </div>
   );
 }

@@ -1,15 +1,9 @@
-import { useQuery } from '@tanstack/react-query';
 import type { Surveyor } from '#shared/surveyors/contract.ts';
 import type { Quotation } from '#shared/survey-orders/pricing.ts';
-import type { ExtraId, ScopeId } from '#shared/surveys/scopes.ts';
-import { formatMoney } from '#web/lib/format.ts';
-import { messageOf } from '#web/lib/form-problem.ts';
+import { formatSum } from '#web/lib/format.ts';
 import { useUnits } from '#web/lib/units.tsx';
-import { Button } from '#web/ui/button.tsx';
 import { Choices } from '#web/ui/check.tsx';
-import { Loading } from '#web/ui/mark.tsx';
-import { Empty, Notice } from '#web/ui/notes.tsx';
-import { surveyOrderQueries } from './queries.ts';
+import { Empty } from '#web/ui/notes.tsx';
 
 export interface Offer {
   surveyor: Surveyor;
@@ -17,35 +11,20 @@ export interface Offer {
 }
 
 interface Props {
-  listingId: string;
-  scope: ScopeId;
-  extras: ExtraId[];
+  offers: readonly Offer[];
+  /** Id of the surveyor chosen. */
   chosen: string | null;
-  onChoose: (offer: Offer) => void;
+  onChoose: (surveyorId: string) => void;
 }
 
 /** Surveyors who could come, with how far they come and what it costs by each. */
-export function Offers({ listingId, scope, extras, chosen, onChoose }: Props) {
+export function Offers({ offers, chosen, onChoose }: Props) {
   const { show } = useUnits();
-  const { data, error, isPending, refetch } = useQuery(
-    surveyOrderQueries.quotes(listingId, { scope, extras }),
-  );
-  if (isPending) return <Loading what="Asking who could come" />;
-  if (error) {
-    return (
-      <Notice kind="bad">
-        {messageOf(error)}{' '}
-        <Button kind="plain" onClick={() => void refetch()}>
-          Try again
-        </Button>
-      </Notice>
-    );
-  }
-  if (data.items.length === 0) {
+  if (offers.length === 0) {
     return (
       <Empty title="No surveyor can take this one at present">
-        None who is insured, competent for this type and material, and independent of both of you is in range
-        with these extras. Try fewer extras, or another day.
+        A surveyor has to be insured, competent for this type and material, within range, offer the extras you
+        want, and have had no dealings with you or the seller. Try fewer extras, or come back in a week.
       </Empty>
     );
   }
@@ -53,14 +32,14 @@ export function Offers({ listingId, scope, extras, chosen, onChoose }: Props) {
     <Choices
       name="surveyor"
       value={chosen}
-      options={data.items.map(({ surveyor, quotation }) => ({
+      options={offers.map(({ surveyor, quotation }) => ({
         id: surveyor.id,
         label: (
           <span className="flex flex-wrap justify-between gap-x-4">
             <span>
               {surveyor.name}, no. {surveyor.number}
             </span>
-            <span>{formatMoney(quotation.total)}</span>
+            <span>{formatSum(quotation.total)}</span>
           </span>
         ),
         hint: (
@@ -71,10 +50,7 @@ export function Offers({ listingId, scope, extras, chosen, onChoose }: Props) {
           </>
         ),
       }))}
-      onChange={(id) => {
-        const found = data.items.find(({ surveyor }) => surveyor.id === id);
-        if (found) onChoose(found);
-      }}
+      onChange={onChoose}
     />
   );
 }

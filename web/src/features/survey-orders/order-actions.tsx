@@ -1,9 +1,11 @@
 import type { SurveyOrder } from '#shared/survey-orders/contract.ts';
 import { sitePaths } from '#shared/site-paths.ts';
-import { formatMoney } from '#web/lib/format.ts';
+import { formatInstant, formatMoney } from '#web/lib/format.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { Button, ButtonLink } from '#web/ui/button.tsx';
+import { Disclosure } from '#web/ui/disclosure.tsx';
 import { Caution, Notice } from '#web/ui/notes.tsx';
+import { Section } from '#web/ui/page.tsx';
 import { useOrderAct, usePayForSurvey } from './queries.ts';
 import { ReasonDialog } from './reason-dialog.tsx';
 import { AgreeTimeForm, ProposeTimesForm } from './time-forms.tsx';
@@ -96,18 +98,25 @@ export function OrderActions({ order }: { order: SurveyOrder }) {
       {can('acceptReport') && (
         <SimpleAct act="acceptReport" order={order} label="Accept the report and release the fee" />
       )}
-      {can('proposeTimes') && (
-        <section aria-label="Propose times" className="grid gap-3 border-t border-rule pt-4">
-          <h3>
-            {order.status === 'arranged'
-              ? 'Propose other times'
-              : order.proposedTimes.length > 0
-                ? 'Propose times anew'
-                : 'Propose times'}
-          </h3>
-          <ProposeTimesForm orderId={order.id} />
-        </section>
-      )}
+      {can('proposeTimes') &&
+        (order.status === 'arranged' ? (
+          <Disclosure summary="It cannot be at that time">
+            <p className="mb-4">
+              Propose other times. The one agreed falls away, and the seller is asked again.
+            </p>
+            <ProposeTimesForm orderId={order.id} />
+          </Disclosure>
+        ) : (
+          <Section title={order.proposedTimes.length > 0 ? 'Propose times anew' : 'Propose times'}>
+            {order.proposedTimes.length > 0 && (
+              <p className="mb-4">
+                Proposed so far: {order.proposedTimes.map((at) => formatInstant(at)).join('; ')}. New ones
+                take their place.
+              </p>
+            )}
+            <ProposeTimesForm orderId={order.id} />
+          </Section>
+        ))}
       <div className="flex flex-wrap gap-4">
         {can('decline') && (
           <ReasonDialog act="decline" orderId={order.id} label="Decline the job">

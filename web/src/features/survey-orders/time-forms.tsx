@@ -5,7 +5,7 @@ import { formatInstant } from '#web/lib/format.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { Button } from '#web/ui/button.tsx';
 import { Choices } from '#web/ui/check.tsx';
-import { Field } from '#web/ui/field.tsx';
+import { Field, FieldGroup } from '#web/ui/field.tsx';
 import { Notice } from '#web/ui/notes.tsx';
 import { useOrderAct } from './queries.ts';
 
@@ -15,12 +15,14 @@ const zone = () => Intl.DateTimeFormat().resolvedOptions().timeZone;
 export function ProposeTimesForm({ orderId }: { orderId: string }) {
   const propose = useOrderAct('proposeTimes', orderId);
   const [times, setTimes] = useState(['', '', '']);
+  const [isEmpty, setIsEmpty] = useState(false);
   const filled = times.flatMap((text, index) =>
     text === '' ? [] : [{ at: new Date(text).toISOString(), index }],
   );
   const faults = propose.error instanceof Problem ? propose.error.errors : [];
   // Empty boxes are not sent, so the server counts only those that are filled.
   const faultOf = (index: number): string | undefined => {
+    if (isEmpty && index === 0) return 'Propose at least one time';
     const place = filled.findIndex((each) => each.index === index);
     return place < 0
       ? undefined
@@ -32,6 +34,8 @@ export function ProposeTimesForm({ orderId }: { orderId: string }) {
       className="grid gap-4"
       onSubmit={(event) => {
         event.preventDefault();
+        setIsEmpty(filled.length === 0);
+        if (filled.length === 0) return;
         propose.mutate({ times: filled.map(({ at }) => at) });
       }}
     >
@@ -54,7 +58,7 @@ export function ProposeTimesForm({ orderId }: { orderId: string }) {
       </div>
       <p className="text-sm text-pencil">Your own clock: {zone()}. The seller sees theirs.</p>
       <div className="flex flex-wrap gap-4">
-        <Button type="submit" isPending={propose.isPending} disabled={filled.length === 0}>
+        <Button type="submit" isPending={propose.isPending}>
           Propose {filled.length === 1 ? 'this time' : 'these times'}
         </Button>
         {times.length < 5 && (
@@ -76,6 +80,7 @@ export function ProposeTimesForm({ orderId }: { orderId: string }) {
 export function AgreeTimeForm({ order }: { order: SurveyOrder }) {
   const agree = useOrderAct('agreeTime', order.id);
   const [chosen, setChosen] = useState<string | null>(null);
+  const [isUndecided, setIsUndecided] = useState(false);
   if (order.proposedTimes.length === 0)
     return <p>The surveyor has not proposed a time yet. You get a letter when they do.</p>;
   return (
@@ -83,21 +88,25 @@ export function AgreeTimeForm({ order }: { order: SurveyOrder }) {
       className="grid gap-4"
       onSubmit={(event) => {
         event.preventDefault();
+        setIsUndecided(chosen === null);
         if (chosen !== null) agree.mutate({ startsAt: chosen });
       }}
     >
       {agree.isError && <Notice kind="bad">{messageOf(agree.error)}</Notice>}
-      <Choices
-        name="time"
-        value={chosen}
-        options={order.proposedTimes.map((at) => ({ id: at, label: formatInstant(at) }))}
-        onChange={setChosen}
-      />
-      <p className="text-sm text-pencil">
-        Your address is shown to the surveyor when you agree, and not before.
-      </p>
+      <FieldGroup
+        legend="Times the surveyor proposes"
+        hint="Your address is shown to the surveyor when you agree one, and not before."
+        error={isUndecided && chosen === null ? 'Choose one of the times' : undefined}
+      >
+        <Choices
+          name="time"
+          value={chosen}
+          options={order.proposedTimes.map((at) => ({ id: at, label: formatInstant(at) }))}
+          onChange={setChosen}
+        />
+      </FieldGroup>
       <div>
-        <Button type="submit" isPending={agree.isPending} disabled={chosen === null}>
+        <Button type="submit" isPending={agree.isPending}>
           Agree this time
         </Button>
       </div>
