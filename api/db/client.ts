@@ -44,7 +44,7 @@ function rawPglite(client: Pick<PGlite, 'query' | 'exec'>): RawSql {
 export function fromPglite(client: PGlite, beforeClose?: () => Promise<void>): Database {
   const db = drizzlePglite({ client, ...options });
   return {
-    db: db as unknown as Db,
+    db,
     raw: rawPglite(client),
     kind: 'pglite',
     migrate: () => migratePglite(db, { migrationsFolder }),
@@ -62,7 +62,7 @@ export function fromPostgres(url: string): Database {
   pool.on('error', () => undefined);
   const db = drizzleNode({ client: pool, ...options });
   return {
-    db: db as unknown as Db,
+    db,
     raw: { query: async (text, values) => pool.query<Record<string, unknown>>(text, values) },
     kind: 'postgres',
     migrate: () => migrateNode(db, { migrationsFolder }),

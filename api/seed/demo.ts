@@ -3,12 +3,13 @@ import type { Deps } from '../deps.ts';
 import * as accounts from '../features/accounts/service.ts';
 import { handleJob } from '../jobs/handlers.ts';
 import { horizontalBoilers } from './boilers-horizontal.ts';
+import { otherBoilers } from './boilers-other.ts';
 import { verticalBoilers } from './boilers-vertical.ts';
 import { makeOrder, seedOrders } from './orders.ts';
 import { makeBoiler, makePeople, makeSurveyors } from './world.ts';
 import type { MadeBoiler } from './world.ts';
 
-const boilers = [...verticalBoilers, ...horizontalBoilers];
+const boilers = [...verticalBoilers, ...horizontalBoilers, ...otherBoilers];
 
 /**
  * Loads the demonstration into an empty database, through the same services that the product uses, with each person

@@ -1,5 +1,6 @@
 import { scoreSurvey } from '#shared/surveys/score.ts';
 import { addDays, addHours, dayOf } from '#shared/time.ts';
+import type { Ctx } from '../ctx.ts';
 import * as examinations from '../features/examinations/service.ts';
 import * as photos from '../features/photos/service.ts';
 import * as orders from '../features/survey-orders/service.ts';
@@ -166,8 +167,14 @@ async function payByCard(checkoutUrl: string): Promise<void> {
   if (answer.status !== 303) throw new Error(`The card page answered ${String(answer.status)}`);
 }
 
-async function examine(world: World, order: SeedOrder, orderId: string, visitDaysAgo: number): Promise<void> {
-  const ctx = world.as(order.surveyor, visitDaysAgo, 4);
+/** Somebody at work at that instant. */
+const asAt = (world: World, person: PersonKey, at: string): Ctx => ({
+  ...world.as(person, 0),
+  now: () => at,
+});
+
+async function examine(world: World, order: SeedOrder, orderId: string, visit: string): Promise<void> {
+  const ctx = asAt(world, order.surveyor, addHours(visit, order.stage === 'begun' ? 0.4 : 4));
   const survey = surveys[order.boiler];
   const opened = await examinations.getSurvey(ctx, orderId);
   const taken = new Map<string, string[]>();
@@ -239,8 +246,8 @@ export async function makeOrder(
   await orders.agreeTime(world.as(seller, placed, 14), id, visit);
   if (!reached('begun')) return;
   const visitDaysAgo = placed - visitAfterDays;
-  await orders.beginSurvey(world.as(surveyor, visitDaysAgo, 1), id);
-  await examine(world, order, id, visitDaysAgo);
+  await orders.beginSurvey(asAt(world, surveyor, addHours(visit, 0.2)), id);
+  await examine(world, order, id, visit);
   if (!reached('settled')) return;
   await orders.acceptReport(world.as(buyer, visitDaysAgo - 2), id);
   await world.deps.queue.drain((job) => handleJob(world.system(visitDaysAgo - 2), job));
@@ -262,5 +269,5 @@ const stages: Stage[] = [
 /** Ten in the morning, UTC, of the day of the visit; for one begun today, a little before now. */
 function visitTime(world: World, placedDaysAgo: number, afterDays: number): string {
   const day = addDays(world.today, afterDays - placedDaysAgo);
-  return afterDays === placedDaysAgo ? addHours(day, 0.5) : `${dayOf(day)}T10:00:00.000Z`;
+  return afterDays === placedDaysAgo ? addHours(day, -0.5) : `${dayOf(day)}T10:00:00.000Z`;
 }

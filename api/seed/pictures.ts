@@ -1,6 +1,7 @@
 import { readFile } from 'node:fs/promises';
 import path from 'node:path';
 import sharp from 'sharp';
+import type { Sharp } from 'sharp';
 
 const folder = path.join(import.meta.dirname, 'photos');
 
@@ -11,8 +12,8 @@ export interface SeedPicture {
   alt: string;
   /** Mirrored left to right. */
   mirror?: boolean;
-  /** Turn of the hues, degrees: repaints a casing. */
-  hue?: number;
+  /** Repaints what is of one hue, degrees: a casing, and not the bench it stands on. */
+  repaint?: { from: number; to: number };
   brightness?: number;
   /** Part of the picture to keep, as shares of its width and height. */
   crop?: { left: number; top: number; width: number; height: number };
@@ -23,9 +24,9 @@ const note = ' Computer-made demonstration picture.';
 /** Says in words that nobody photographed this. */
 export const altOf = (picture: SeedPicture): string => picture.alt + note;
 
-export async function readPicture({ file, mirror, hue, brightness, crop }: SeedPicture): Promise<Buffer> {
+export async function readPicture({ file, mirror, repaint, brightness, crop }: SeedPicture): Promise<Buffer> {
   const original = await readFile(path.join(folder, `${file}.jpg`));
-  if (!mirror && hue === undefined && brightness === undefined && !crop) return original;
+  if (!mirror && !repaint && brightness === undefined && !crop) return original;
   const image = sharp(original);
   const { width, height } = await image.metadata();
   if (crop) {
@@ -37,11 +38,45 @@ export async function readPicture({ file, mirror, hue, brightness, crop }: SeedP
     });
   }
   if (mirror) image.flop();
-  if (hue !== undefined || brightness !== undefined) {
-    image.modulate({
-      ...(hue === undefined ? {} : { hue }),
-      ...(brightness === undefined ? {} : { brightness }),
-    });
-  }
+  if (brightness !== undefined) image.modulate({ brightness });
+  if (repaint) return repainted(image, repaint);
   return image.jpeg({ quality: 88 }).toBuffer();
+}
+
+/** How far from the hue repainted a pixel may be, degrees, and how strong its colour must be. */
+const reach = 24;
+const leastSaturation = 0.42;
+
+async function repainted(image: Sharp, { from, to }: { from: number; to: number }): Promise<Buffer> {
+  const { data, info } = await image.removeAlpha().raw().toBuffer({ resolveWithObject: true });
+  for (let at = 0; at < data.length; at += 3) {
+    const [red = 0, green = 0, blue = 0] = data.subarray(at, at + 3);
+    const [hue, saturation, value] = hsvOf(red, green, blue);
+    const off = Math.abs(((hue - from + 540) % 360) - 180);
+    if (off <= reach && saturation >= leastSaturation)
+      data.set(rgbOf((to + hue - from + 720) % 360, saturation, value), at);
+  }
+  const raw = { width: info.width, height: info.height, channels: 3 as const };
+  return sharp(data, { raw }).jpeg({ quality: 88 }).toBuffer();
+}
+
+function hsvOf(red: number, green: number, blue: number): [hue: number, saturation: number, value: number] {
+  const most = Math.max(red, green, blue);
+  const spread = most - Math.min(red, green, blue);
+  if (spread === 0) return [0, 0, most];
+  const sector =
+    most === red
+      ? (green - blue) / spread
+      : most === green
+        ? 2 + (blue - red) / spread
+        : 4 + (red - green) / spread;
+  return [(sector * 60 + 360) % 360, spread / most, most];
+}
+
+function rgbOf(hue: number, saturation: number, value: number): [red: number, green: number, blue: number] {
+  const part = (offset: number): number => {
+    const k = (offset + hue / 60) % 6;
+    return Math.round(value * (1 - saturation * Math.max(0, Math.min(k, 4 - k, 1))));
+  };
+  return [part(5), part(3), part(1)];
 }

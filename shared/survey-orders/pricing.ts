@@ -18,9 +18,9 @@ export const feeBands: Record<ScopeId | ExtraId, { lowMinor: number; highMinor: 
 
 const feeOf = (id: ScopeId | ExtraId) =>
   z
-    .int('Whole pence')
-    .min(feeBands[id].lowMinor, `At least ${(feeBands[id].lowMinor / 100).toFixed(2)}`)
-    .max(feeBands[id].highMinor, `At most ${(feeBands[id].highMinor / 100).toFixed(2)}`);
+    .int('Give a sum in pounds and pence')
+    .min(feeBands[id].lowMinor, `At least £${(feeBands[id].lowMinor / 100).toFixed(2)}`)
+    .max(feeBands[id].highMinor, `At most £${(feeBands[id].highMinor / 100).toFixed(2)}`);
 
 /** A surveyor's own fees, within the bands. An extra at null is not offered. */
 export const surveyorFees = z.strictObject({
@@ -30,7 +30,10 @@ export const surveyorFees = z.strictObject({
   thickness: feeOf('thickness').nullable(),
   borescope: feeOf('borescope').nullable(),
   /** Travel for each kilometre, there and back counted, in pence. */
-  perKmMinor: z.int('Whole pence').min(0, 'Not negative').max(100, 'At most 1.00 a kilometre'),
+  perKmMinor: z
+    .int('Give a sum in pounds and pence')
+    .min(0, 'Not negative')
+    .max(100, 'At most £1.00 a kilometre'),
 });
 export type SurveyorFees = z.infer<typeof surveyorFees>;
 

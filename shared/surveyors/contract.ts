@@ -9,7 +9,7 @@ import { day } from '../time.ts';
 /** What a surveyor says of themselves, and what the platform checks before each job. */
 export const surveyorTerms = z.strictObject({
   townId: z.int('Choose your nearest town'),
-  rangeKm: z.int('Whole kilometres').min(5, 'At least 5 km').max(1_000, 'At most 1,000 km'),
+  rangeKm: z.int('Give how far you go').min(5, 'At least 5 km').max(1_000, 'At most 1,000 km'),
   types: z.array(boilerTypeId).min(1, 'Choose at least one type'),
   materials: z.array(materialId).min(1, 'Choose at least one material'),
   insuredUntilOn: day,

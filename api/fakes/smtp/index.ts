@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
-import { mkdirSync } from 'node:fs';
-import { readdir, readFile, rename, writeFile } from 'node:fs/promises';
+import { mkdirSync, rename, writeFile } from 'node:fs';
+import { readdir, readFile } from 'node:fs/promises';
 import type { AddressInfo } from 'node:net';
 import path from 'node:path';
 import { simpleParser } from 'mailparser';
@@ -21,6 +21,19 @@ export interface SmtpFake {
 }
 
 const longest = 300;
+
+/** Writes a letter whole, and tells the server's own callback, which knows nothing of promises. */
+function keep(file: string, content: Buffer, done: (error?: Error) => void): void {
+  writeFile(`${file}.part`, content, (fault) => {
+    if (fault) {
+      done(fault);
+      return;
+    }
+    rename(`${file}.part`, file, (error) => {
+      done(error ?? undefined);
+    });
+  });
+}
 
 async function readLetter(file: string): Promise<Letter> {
   const mail = await simpleParser(await readFile(file));
@@ -56,16 +69,7 @@ export async function startSmtpFake({ port, host, dataDir }: Options): Promise<S
         // Names sort by time of arrival, so that newest first needs no reading.
         const name = `${String(Date.now()).padStart(15, '0')}-${randomUUID()}`;
         const file = path.join(dataDir, `${name}.eml`);
-        writeFile(`${file}.part`, Buffer.concat(chunks))
-          .then(() => rename(`${file}.part`, file))
-          .then(
-            () => {
-              done();
-            },
-            (error: unknown) => {
-              done(error instanceof Error ? error : new Error(String(error)));
-            },
-          );
+        keep(file, Buffer.concat(chunks), done);
       });
     },
   });

@@ -22,10 +22,12 @@ export interface Card {
 export type CardFaults = Partial<Record<keyof Card, string>>;
 
 function passesCheckDigit(number: string): boolean {
-  const sum = [...number].toReversed().reduce((total, digit, index) => {
-    const value = Number(digit) * (index % 2 === 1 ? 2 : 1);
-    return total + (value > 9 ? value - 9 : value);
-  }, 0);
+  const sum = Array.from(number)
+    .toReversed()
+    .reduce((total, digit, index) => {
+      const value = Number(digit) * (index % 2 === 1 ? 2 : 1);
+      return total + (value > 9 ? value - 9 : value);
+    }, 0);
   return sum % 10 === 0;
 }
 

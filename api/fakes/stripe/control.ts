@@ -3,6 +3,9 @@ import { escape, page } from './html.ts';
 import type { Notices } from './notices.ts';
 import type { Store } from './store.ts';
 
+const button = (path: string, label: string) =>
+  `<form method="post" action="/control/${path}"><button class="quiet">${label}</button></form>`;
+
 /** A desk where a person or a test holds, releases, reorders, repeats and drops the stand-in's notices. */
 export function control(store: Store, notices: Notices): Router {
   const router = Router();
@@ -20,8 +23,6 @@ export function control(store: Store, notices: Notices): Router {
   });
   router.get('/control', (_request, response) => {
     const { mode, deliveries } = view();
-    const button = (path: string, label: string) =>
-      `<form method="post" action="/control/${path}"><button class="quiet">${label}</button></form>`;
     const rows = deliveries
       .toReversed()
       .map(

@@ -1,4 +1,4 @@
-import Stripe from 'stripe';
+import { Stripe } from 'stripe';
 import type { Log } from '../../ctx.ts';
 import { plain } from './shapes.ts';
 import { nowSeconds } from './store.ts';

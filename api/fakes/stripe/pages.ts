@@ -51,6 +51,9 @@ const authenticatePage = (session: Thing): string =>
 <button name="answer" value="authorise">Authorise</button><button class="quiet" name="answer" value="refuse">Refuse</button></div></form>`,
   );
 
+const successUrl = (session: Thing): string =>
+  String(session['success_url']).replaceAll('{CHECKOUT_SESSION_ID}', session.id);
+
 /** The hosted pages: the card, the bank's question, and the setting up of a payee's account. */
 export function pages(store: Store, notices: Notices): Router {
   const router = Router();
@@ -62,8 +65,6 @@ export function pages(store: Store, notices: Notices): Router {
     const session = store.find('checkout.session', id);
     return session?.['status'] === 'open' ? session : undefined;
   };
-  const successUrl = (session: Thing): string =>
-    String(session['success_url']).replaceAll('{CHECKOUT_SESSION_ID}', session.id);
 
   // Only here: the API's own bodies nest.
   router.use(['/pay', '/set-up'], express.urlencoded({ extended: false, limit: '10kb' }));
@@ -75,7 +76,7 @@ export function pages(store: Store, notices: Notices): Router {
     response.status(session ? 200 : 404).send(session ? cardPage(session) : gone);
   });
   router.post('/pay/:id', (request, response) => {
-    const session = openSession(String(request.params['id']));
+    const session = openSession(request.params.id);
     if (!session) {
       response.status(404).send(gone);
       return;
@@ -108,7 +109,7 @@ export function pages(store: Store, notices: Notices): Router {
     response.redirect(303, successUrl(session));
   });
   router.post('/pay/:id/authorise', (request, response) => {
-    const session = openSession(String(request.params['id']));
+    const session = openSession(request.params.id);
     if (!session) {
       response.status(404).send(gone);
       return;
@@ -141,7 +142,7 @@ export function pages(store: Store, notices: Notices): Router {
     );
   });
   router.post('/set-up/:id', (request, response) => {
-    const account = store.find('account', String(request.params['id']));
+    const account = store.find('account', request.params.id);
     if (!account) {
       response.status(404).send(gone);
       return;
@@ -149,7 +150,8 @@ export function pages(store: Store, notices: Notices): Router {
     Object.assign(account, { details_submitted: true, charges_enabled: true, payouts_enabled: true });
     notices.tell('account.updated', account);
     store.save();
-    response.redirect(303, String(account['fake_return_url'] ?? '/'));
+    const back = account['fake_return_url'];
+    response.redirect(303, typeof back === 'string' ? back : '/');
   });
   return router;
 }

@@ -1,7 +1,7 @@
 import { Suspense, useEffect, useRef, useState } from 'react';
 import { Link, NavLink, Outlet, ScrollRestoration, useLocation } from 'react-router-dom';
 import { sitePaths } from '#shared/site-paths.ts';
-import { AccountCorner } from '#web/features/accounts/account-corner.tsx';
+import { AccountCorner, AccountPlaces } from '#web/features/accounts/account-corner.tsx';
 import { Loading, Mark } from '#web/ui/mark.tsx';
 import { Footer } from './footer.tsx';
 
@@ -78,6 +78,11 @@ export function Layout() {
           {isMenuOpen && (
             <nav id="menu" aria-label="Places" className="grid w-full border-t border-rule py-2 md:hidden">
               <Places
+                onGo={() => {
+                  setIsMenuOpen(false);
+                }}
+              />
+              <AccountPlaces
                 onGo={() => {
                   setIsMenuOpen(false);
                 }}

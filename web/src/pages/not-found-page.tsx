@@ -1,6 +1,17 @@
-import { Problem } from '#shared/problem.ts';
+import { Link } from 'react-router-dom';
+import { sitePaths } from '#shared/site-paths.ts';
+import { Page } from '#web/ui/page.tsx';
 
-/** No page has this address: the error screen says so. */
-export function Component(): never {
-  throw new Problem('not-found');
+export function Component() {
+  return (
+    <Page title="There is nothing here" isNarrow>
+      <p>
+        No page has this address. It may be mistyped, or the page may have moved. Look through the{' '}
+        <Link className="link" to={sitePaths.boilers}>
+          boilers
+        </Link>
+        .
+      </p>
+    </Page>
+  );
 }

@@ -2,10 +2,11 @@ import { useSuspenseInfiniteQuery, useSuspenseQuery } from '@tanstack/react-quer
 import { Link } from 'react-router-dom';
 import { sitePaths } from '#shared/site-paths.ts';
 import { useSignedIn } from '#web/features/accounts/use-me.ts';
+import { accountWords } from '#web/features/office/account-words.ts';
 import { OfficeFrame } from '#web/features/office/office-frame.tsx';
 import { officeQueries } from '#web/features/office/queries.ts';
 import { requireOffice } from '#web/features/office/require-office.ts';
-import { formatInstant, formatMoney } from '#web/lib/format.ts';
+import { formatInstant, formatSum } from '#web/lib/format.ts';
 import { Button } from '#web/ui/button.tsx';
 import { KeyFigures } from '#web/ui/figures.tsx';
 import { Empty, Notice } from '#web/ui/notes.tsx';
@@ -29,7 +30,7 @@ function Agreement({ agrees }: { agrees: boolean | null }) {
   );
 }
 
-function Ledger() {
+function Ledger({ labels }: { labels: ReadonlyMap<string, string> }) {
   const { data, hasNextPage, isFetchingNextPage, fetchNextPage } = useSuspenseInfiniteQuery(
     officeQueries.ledger(),
   );
@@ -43,6 +44,7 @@ function Ledger() {
     <>
       <Table
         caption="Ledger entries, newest first; a debit is positive, a credit negative"
+        isWide
         rows={lines}
         keyOf={({ entry, account }) => `${String(entry.id)}${account}`}
         columns={[
@@ -62,8 +64,8 @@ function Ledger() {
                 ''
               ),
           },
-          { head: 'Account', cell: ({ account }) => <span className="break-all">{account}</span> },
-          { head: 'Amount', isNumber: true, cell: ({ amount }) => formatMoney(amount) },
+          { head: 'Account', cell: ({ account }) => labels.get(account) ?? accountWords(account) },
+          { head: 'Amount', isNumber: true, cell: ({ amount }) => formatSum(amount) },
         ]}
       />
       {hasNextPage && (
@@ -85,12 +87,13 @@ export function Component() {
       <div className="grid gap-6">
         <Agreement agrees={data.agrees} />
         <KeyFigures
+          columns={3}
           items={[
-            { label: 'Held on orders', value: formatMoney(data.held) },
-            { label: 'With the payment service, by our ledger', value: formatMoney(data.processorByLedger) },
+            { label: 'Held on orders', value: formatSum(data.held) },
+            { label: 'With the payment service, by our ledger', value: formatSum(data.processorByLedger) },
             {
               label: 'With the payment service, by itself',
-              value: data.processorByItself ? formatMoney(data.processorByItself) : '–',
+              value: data.processorByItself ? formatSum(data.processorByItself) : '–',
             },
           ]}
         />
@@ -102,12 +105,12 @@ export function Component() {
           keyOf={({ account, balance }) => account + balance.currency}
           columns={[
             { head: 'Account', cell: ({ label }) => label },
-            { head: 'Balance', isNumber: true, cell: ({ balance }) => formatMoney(balance) },
+            { head: 'Balance', isNumber: true, cell: ({ balance }) => formatSum(balance) },
           ]}
         />
       </Section>
       <Section title="Ledger">
-        <Ledger />
+        <Ledger labels={new Map(data.balances.map(({ account, label }) => [account, label]))} />
       </Section>
     </OfficeFrame>
   );

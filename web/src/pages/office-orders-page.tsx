@@ -6,7 +6,7 @@ import { useSignedIn } from '#web/features/accounts/use-me.ts';
 import { OfficeFrame } from '#web/features/office/office-frame.tsx';
 import { officeQueries } from '#web/features/office/queries.ts';
 import { requireOffice } from '#web/features/office/require-office.ts';
-import { formatFromNow, formatMoney } from '#web/lib/format.ts';
+import { formatFromNow, formatSum } from '#web/lib/format.ts';
 import { Empty } from '#web/ui/notes.tsx';
 import { Table } from '#web/ui/table.tsx';
 
@@ -40,6 +40,7 @@ export function Component() {
         <Table
           caption="Survey orders"
           isCaptionHidden
+          isWide
           rows={data.items}
           keyOf={({ id }) => id}
           columns={[
@@ -59,8 +60,8 @@ export function Component() {
               head: 'Moved',
               cell: ({ movedAt }) => <span className="whitespace-nowrap">{formatFromNow(movedAt)}</span>,
             },
-            { head: 'Total', isNumber: true, cell: ({ total }) => formatMoney(total) },
-            { head: 'Held', isNumber: true, cell: ({ held }) => formatMoney(held) },
+            { head: 'Total', isNumber: true, cell: ({ total }) => formatSum(total) },
+            { head: 'Held', isNumber: true, cell: ({ held }) => formatSum(held) },
           ]}
         />
       )}

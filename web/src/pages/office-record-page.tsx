@@ -25,6 +25,7 @@ export function Component() {
       ) : (
         <Table
           caption="Newest first"
+          isWide
           rows={entries}
           keyOf={({ id }) => id}
           columns={[

@@ -28,10 +28,10 @@ export function Page({ title, sub, crumbs, aside, children, isNarrow = false }: 
         <nav aria-label="You are here" className="mb-1 text-sm text-pencil">
           <ol className="flex flex-wrap gap-x-2">
             {crumbs.map((crumb, index) => (
-              <li key={crumb.label} className="flex gap-2">
+              <li key={crumb.label} className="flex min-h-6 items-center gap-2">
                 {index > 0 && <span aria-hidden="true">/</span>}
                 {crumb.to ? (
-                  <Link to={crumb.to} className="underline-offset-4 hover:underline">
+                  <Link to={crumb.to} className="py-0.5 underline-offset-4 hover:underline">
                     {crumb.label}
                   </Link>
                 ) : (

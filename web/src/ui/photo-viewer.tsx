@@ -24,7 +24,7 @@ export function PhotoViewer({
       <ul
         className={
           layout === 'lead'
-            ? 'grid grid-cols-3 gap-2 [&>li:first-child]:col-span-3'
+            ? 'grid grid-cols-3 content-start gap-2 self-start [&>li:first-child]:col-span-3'
             : 'grid grid-cols-3 gap-2 sm:grid-cols-4'
         }
       >

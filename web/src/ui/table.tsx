@@ -12,15 +12,24 @@ interface Props<Row> {
   columns: readonly Column<Row>[];
   rows: readonly Row[];
   keyOf: (row: Row, index: number) => string;
+  /** Many columns: on a phone they keep their width and are scrolled to, rather than squeezed. */
+  isWide?: boolean;
 }
 
 /** A table that reads like a parts list; on a phone it scrolls within itself. */
-export function Table<Row>({ caption, isCaptionHidden = false, columns, rows, keyOf }: Props<Row>) {
+export function Table<Row>({
+  caption,
+  isCaptionHidden = false,
+  columns,
+  rows,
+  keyOf,
+  isWide = false,
+}: Props<Row>) {
   return (
     // A region that scrolls must be reachable by keyboard, or its far columns are not.
     // oxlint-disable-next-line jsx-a11y/no-noninteractive-tabindex
     <section className="overflow-x-auto" tabIndex={0} aria-label={caption}>
-      <table className="w-full border-collapse text-[0.9375rem] leading-6">
+      <table className={`w-full border-collapse text-[0.9375rem] leading-6 ${isWide ? 'min-w-[56rem]' : ''}`}>
         <caption className={isCaptionHidden ? 'sr-only' : 'pb-2 text-left text-label text-pencil'}>
           {caption}
         </caption>

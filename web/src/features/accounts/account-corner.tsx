@@ -3,6 +3,21 @@ import { Link } from 'react-router-dom';
 import { sitePaths } from '#shared/site-paths.ts';
 import { accountQueries } from './queries.ts';
 
+/** What the corner has no room for on a phone, for the menu. */
+export function AccountPlaces({ onGo }: { onGo: () => void }) {
+  const me = useQuery(accountQueries.me()).data?.me;
+  if (!me) return null;
+  const places = [
+    ...(me.roles.includes('office') ? [{ to: sitePaths.officeOrders, label: 'Office' }] : []),
+    { to: sitePaths.account, label: `My account (${me.name})` },
+  ];
+  return places.map(({ to, label }) => (
+    <Link key={to} to={to} onClick={onGo} className="flex min-h-11 items-center font-medium">
+      {label}
+    </Link>
+  ));
+}
+
 /** The corner of the frame that knows who is here. It keeps its place while it asks. */
 export function AccountCorner() {
   const { data } = useQuery(accountQueries.me());

@@ -13,7 +13,7 @@ export function ListingEntry({ listing, isFirst = false }: { listing: ListingSum
   const { show } = useUnits();
   const { slug, title, type, material, cover, asking, town, verdict, condition, evidence } = listing;
   return (
-    <article className="group relative grid content-start gap-3 border-t border-ink pt-3">
+    <article className="group relative grid content-start gap-3 border-t border-rule pt-3">
       {cover ? (
         <Photo
           photo={{ ...cover, alt: '' }}

@@ -1,5 +1,5 @@
 import Uppy from '@uppy/core';
-import type { Meta, UppyFile } from '@uppy/core';
+import type { Meta, UploadResult } from '@uppy/core';
 import Dashboard from '@uppy/react/dashboard';
 import Tus from '@uppy/tus';
 import { useEffect, useState } from 'react';
@@ -30,7 +30,6 @@ interface UploadMeta extends Meta {
   recordId: string;
   view: string;
 }
-type Uploaded = UppyFile<UploadMeta, Record<string, never>>;
 
 function createUppy({ purpose, recordId, view }: Omit<Props, 'onUploaded'>) {
   const isDocument = purpose === 'listing-document';
@@ -81,13 +80,14 @@ export function Uploader({ purpose, recordId, view, onUploaded }: Props) {
     uppy.setMeta({ view });
   }, [uppy, view]);
   useEffect(() => {
-    const done = (file: Uploaded | undefined) => {
+    // Only when the whole batch is done: a file taken out before that is taken for given up, and deleted at the server.
+    const done = ({ successful }: UploadResult<UploadMeta, Record<string, never>>) => {
+      for (const { id } of successful ?? []) uppy.removeFile(id);
       onUploaded();
-      if (file) uppy.removeFile(file.id);
     };
-    uppy.on('upload-success', done);
+    uppy.on('complete', done);
     return () => {
-      uppy.off('upload-success', done);
+      uppy.off('complete', done);
     };
   }, [uppy, onUploaded]);
   return (

@@ -17,14 +17,16 @@ type Member = z.infer<typeof officeMember>;
 export function MemberRow({ member }: { member: Member }) {
   const [asked, setAsked] = useState<{ role: Role; change: 'grant' | 'withdraw' }>();
   const [reason, setReason] = useState('');
+  const [isShort, setIsShort] = useState(false);
   const changeRole = useChangeRole(member.id);
   const close = () => {
     setAsked(undefined);
     setReason('');
+    setIsShort(false);
     changeRole.reset();
   };
   const words = asked
-    ? `${asked.change === 'grant' ? 'Grant' : 'Withdraw'} the role: ${roles[asked.role].toLowerCase()}`
+    ? `${asked.change === 'grant' ? 'Grant' : 'Withdraw'} the role ${roles[asked.role].toLowerCase()}`
     : '';
   return (
     <li className="grid gap-x-8 gap-y-2 py-4 sm:grid-cols-[minmax(0,1fr)_auto]">
@@ -55,14 +57,21 @@ export function MemberRow({ member }: { member: Member }) {
       <Dialog title={words} isOpen={asked !== undefined} onClose={close}>
         <form
           className="grid gap-4"
+          noValidate
           onSubmit={(event) => {
             event.preventDefault();
+            setIsShort(reason.trim().length < 3);
+            if (reason.trim().length < 3) return;
             if (asked) changeRole.mutate({ ...asked, reason }, { onSuccess: close });
           }}
         >
           <p>{member.name}. It takes effect at their next request.</p>
           {changeRole.isError && <Notice kind="bad">{messageOf(changeRole.error)}</Notice>}
-          <Field label="Why" hint="Kept in the record">
+          <Field
+            label="Why"
+            hint="Kept in the record"
+            error={isShort ? 'Give a reason in a few words' : undefined}
+          >
             {(control) => (
               <input
                 {...control}
@@ -75,8 +84,12 @@ export function MemberRow({ member }: { member: Member }) {
             )}
           </Field>
           <div>
-            <Button type="submit" isPending={changeRole.isPending} disabled={reason.trim().length < 3}>
-              Do it
+            <Button
+              type="submit"
+              kind={asked?.change === 'withdraw' ? 'danger' : 'primary'}
+              isPending={changeRole.isPending}
+            >
+              {words}
             </Button>
           </div>
         </form>

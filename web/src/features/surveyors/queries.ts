@@ -9,6 +9,8 @@ export const surveyorQueries = {
     queryOptions({
       queryKey: [...surveyorQueries.all, 'mine'] as const,
       queryFn: ({ signal }) => call(contract.getMySurveyorTerms, {}, { signal }),
+      // Back from the payment service's page, its notice may be a moment behind.
+      refetchInterval: ({ state }) => (state.data?.payoutsReady === false ? 10_000 : false),
     }),
 };
 

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import type { ReactNode } from 'react';
 import { materials } from '#shared/boilers/boiler.ts';
 import type { MaterialId } from '#shared/boilers/boiler.ts';
@@ -53,10 +53,18 @@ export function TermsForm({ terms, townInput }: Props) {
   const save = useSaveTerms();
   const [draft, setDraft] = useState<Draft>(terms ?? empty);
   const [errors, setErrors] = useState<readonly FieldError[]>([]);
+  const form = useRef<HTMLFormElement>(null);
+  useEffect(() => {
+    if (errors.length > 0)
+      form.current
+        ?.querySelector<HTMLElement>('[aria-invalid="true"], [aria-describedby$="-error"] input')
+        ?.focus();
+  }, [errors]);
   const at = (pointer: string): string | undefined =>
     errors.find((error) => error.pointer === pointer)?.detail;
   const set = (change: Partial<Draft>) => {
     setDraft({ ...draft, ...change });
+    if (save.isSuccess) save.reset();
   };
   const setFee = (id: keyof Draft['fees'], minor: number | null) => {
     set({ fees: { ...draft.fees, [id]: minor } });
@@ -76,6 +84,7 @@ export function TermsForm({ terms, townInput }: Props) {
   };
   return (
     <form
+      ref={form}
       noValidate
       className="grid gap-8"
       onSubmit={(event) => {
@@ -83,8 +92,6 @@ export function TermsForm({ terms, townInput }: Props) {
         submit();
       }}
     >
-      {errors.length > 0 && <Notice kind="bad">Some entries need mending; each says what.</Notice>}
-      {save.isError && errors.length === 0 && <Notice kind="bad">{messageOf(save.error)}</Notice>}
       <div className="grid gap-6 sm:grid-cols-2">
         {townInput((townId) => {
           set({ townId });
@@ -207,6 +214,8 @@ export function TermsForm({ terms, townInput }: Props) {
           set({ isTakingJobs: event.target.checked });
         }}
       />
+      {errors.length > 0 && <Notice kind="bad">Not saved: some entries need mending; each says what.</Notice>}
+      {save.isError && errors.length === 0 && <Notice kind="bad">{messageOf(save.error)}</Notice>}
       <div className="flex items-center gap-4">
         <Button type="submit" isPending={save.isPending}>
           Save
