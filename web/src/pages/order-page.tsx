@@ -67,7 +67,7 @@ export function Component() {
       ]}
       sub={`${scopes[order.scope].label} · ${listing.town.name}`}
     >
-      <div className="grid gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,7fr)_minmax(0,5fr)]">
+      <div className="grid gap-x-12 gap-y-10 lg:grid-cols-[minmax(0,7fr)_minmax(0,5fr)] lg:grid-rows-[auto_1fr]">
         <div>
           <div className="mb-8 border border-ink bg-sheet p-5">
             <output className="block text-xl font-bold">{orderStatusLabels[order.status]}</output>
@@ -95,18 +95,8 @@ export function Component() {
           )}
           {isBack ? <WaitingForPayment order={order} /> : <OrderActions order={order} />}
           {!isAhead(order) && <Visit order={order} />}
-          <Section title="Record">
-            <Timeline
-              items={order.record.map(({ event, label, at, by, reason }, index) => ({
-                id: `${event}${at}${String(index)}`,
-                when: formatInstant(at),
-                what: label,
-                more: [by, reason].filter(Boolean).join(': '),
-              }))}
-            />
-          </Section>
         </div>
-        <div>
+        <div className="lg:row-span-2">
           {listing.cover && (
             <div className="mb-8">
               <Photo photo={listing.cover} sizes="(min-width: 64rem) 28rem, 100vw" shape="4/3" isFirst />
@@ -131,6 +121,18 @@ export function Component() {
               <QuotationTable quotation={order.quotation} hasSurveyorPart={order.part !== 'buyer'} />
             </Section>
           )}
+        </div>
+        <div>
+          <Section title="Record">
+            <Timeline
+              items={order.record.map(({ event, label, at, by, reason }, index) => ({
+                id: `${event}${at}${String(index)}`,
+                when: formatInstant(at),
+                what: label,
+                more: [by, reason].filter(Boolean).join(': '),
+              }))}
+            />
+          </Section>
         </div>
       </div>
     </Page>

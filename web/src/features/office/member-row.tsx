@@ -70,7 +70,7 @@ export function MemberRow({ member }: { member: Member }) {
           <Field
             label="Why"
             hint="Kept in the record"
-            error={isShort ? 'Give a reason in a few words' : undefined}
+            error={isShort && reason.trim().length < 3 ? 'Give a reason in a few words' : undefined}
           >
             {(control) => (
               <input

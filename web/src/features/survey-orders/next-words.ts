@@ -17,7 +17,7 @@ const words: Record<OrderStatus, Partial<Record<Part, string>> & { all: string }
   arranging: {
     all: 'Surveyor and seller are agreeing a time.',
     surveyor: 'Propose times for the visit. The address is shown to you once the seller agrees one.',
-    seller: 'Agree one of the times the surveyor proposes.',
+    seller: 'The surveyor proposes times for the visit; you get a letter when they are here.',
   },
   arranged: { all: 'The visit is arranged.', surveyor: 'Begin the examination when you are at the boiler.' },
   examining: {
@@ -40,6 +40,16 @@ const words: Record<OrderStatus, Partial<Record<Part, string>> & { all: string }
   cancelled: { all: 'Nothing was charged.' },
 };
 
+/** Once times are proposed it is the seller's turn. */
+const proposedWords: Partial<Record<Part, string>> = {
+  surveyor: 'The seller has your times and agrees one; the address is shown to you then.',
+  seller: 'Agree one of the times the surveyor proposes.',
+};
+
+type Standing = Pick<SurveyOrder, 'status' | 'part' | 'proposedTimes'>;
+
 /** What happens next, for this person. */
-export const nextWords = ({ status, part }: Pick<SurveyOrder, 'status' | 'part'>): string =>
-  words[status][part] ?? words[status].all;
+export function nextWords({ status, part, proposedTimes }: Standing): string {
+  const proposed = status === 'arranging' && proposedTimes.length > 0 ? proposedWords[part] : undefined;
+  return proposed ?? words[status][part] ?? words[status].all;
+}

@@ -61,7 +61,7 @@ export function ReasonDialog({ act, orderId, label, children }: Props) {
           <Field
             label="Why"
             hint="The others read this"
-            error={isShort ? 'Give a reason in a few words' : undefined}
+            error={isShort && reason.trim().length < 3 ? 'Give a reason in a few words' : undefined}
           >
             {(control) => (
               <textarea

@@ -22,7 +22,7 @@ export function ProposeTimesForm({ orderId }: { orderId: string }) {
   const faults = propose.error instanceof Problem ? propose.error.errors : [];
   // Empty boxes are not sent, so the server counts only those that are filled.
   const faultOf = (index: number): string | undefined => {
-    if (isEmpty && index === 0) return 'Propose at least one time';
+    if (isEmpty && filled.length === 0 && index === 0) return 'Propose at least one time';
     const place = filled.findIndex((each) => each.index === index);
     return place < 0
       ? undefined
@@ -36,7 +36,14 @@ export function ProposeTimesForm({ orderId }: { orderId: string }) {
         event.preventDefault();
         setIsEmpty(filled.length === 0);
         if (filled.length === 0) return;
-        propose.mutate({ times: filled.map(({ at }) => at) });
+        propose.mutate(
+          { times: filled.map(({ at }) => at) },
+          {
+            onSuccess: () => {
+              setTimes(['', '', '']);
+            },
+          },
+        );
       }}
     >
       {propose.isError && <Notice kind="bad">{messageOf(propose.error)}</Notice>}
