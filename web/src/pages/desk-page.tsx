@@ -40,7 +40,7 @@ export function Component() {
               <p
                 className={`text-sm sm:text-right ${dueAt === null ? 'text-pencil' : 'font-medium text-attention'}`}
               >
-                {dueAt === null ? `Since ${formatFromNow(since)}` : `Due ${formatFromNow(dueAt)}`}
+                {dueAt === null ? `Came up ${formatFromNow(since)}` : `Due ${formatFromNow(dueAt)}`}
               </p>
             </li>
           ))}
