@@ -1,7 +1,7 @@
 import { compareCodeUnits } from './canonical.ts';
 import { examinedOf, isExamined } from './examined.ts';
 import type { SurveyInput } from './examined.ts';
-import { quadraticKappa } from './kappa.ts';
+import { quadraticKappa } from '../engineering/kappa.ts';
 import type { Grade } from './record.ts';
 import { criterionOf } from './rubric/index.ts';
 

@@ -1,3 +1,5 @@
+import { liftShares, napierKgPerH } from '../engineering/safety-valve.ts';
+import { atmospherePa } from '../engineering/steam.ts';
 import type { BoilerFacts } from '../boilers/boiler.ts';
 import { accumulation, mostPa } from './checks-steam.ts';
 import { check, figure } from './check.ts';
@@ -6,12 +8,7 @@ import type { Examined, SurveyInput } from './examined.ts';
 import type { EngineeringCheck } from './result.ts';
 import { rateText } from './words.ts';
 
-/** Share of the seat's bore area that each class of lift opens (Indian Boiler Regulations: D/24, D/12, D/4). */
-const openShare: Readonly<Record<string, number>> = { ordinary: 1 / 6, high: 1 / 3, full: 1 };
-
-/** Napier: W[kg/h] = A[mm²]·P[kPa absolute]/190.5, at working pressure and a tenth. */
-const napierKgPerH = (areaMm2: number, workingPa: number): number =>
-  (areaMm2 * ((mostPa(workingPa) + 101_325) / 1_000)) / 190.5;
+const openShare: Readonly<Record<string, number>> = liftShares;
 
 /** Steam made for each square metre of heating surface, kg/h, low and high; common practice and from memory. */
 const ratesByFiring: Partial<Record<BoilerFacts['firing'], readonly [low: number, high: number]>> = {
@@ -50,7 +47,10 @@ export function valveCapacity(input: SurveyInput, items: readonly Examined[]): E
   // Where the lift is not recorded the least is taken.
   const share = lifts.length === 0 ? 1 / 6 : Math.min(...lifts);
   const passes =
-    napierKgPerH((Math.PI / 4) * bore ** 2 * share, input.facts.workingPressurePa) * Math.max(1, valves);
+    napierKgPerH({
+      areaMm2: (Math.PI / 4) * bore ** 2 * share,
+      pressurePaAbs: mostPa(input.facts.workingPressurePa) + atmospherePa,
+    }) * Math.max(1, valves);
   const figures = [
     figure('Valve passes', tenths(passes), 'kg/h'),
     figure('Steam made, low', tenths(evaporation.low), 'kg/h'),

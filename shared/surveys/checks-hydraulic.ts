@@ -1,3 +1,4 @@
+import { gaugeWindowPa, wantedTestPa } from '../engineering/hydraulic-test.ts';
 import type { BoilerFacts } from '../boilers/boiler.ts';
 import { check, figure, isAbove } from './check.ts';
 import type { SurveyInput } from './examined.ts';
@@ -53,7 +54,7 @@ const wetGlands = ({ leaks }: HydraulicTest): HydraulicTest['leaks'] =>
 
 /** Working pressure times the multiple its kind of test asks for. */
 export const askedPa = (facts: BoilerFacts, test: HydraulicTest): number =>
-  (facts.workingPressurePa * (test.firstTest ? limits.firstTestPercent : limits.repeatTestPercent)) / 100;
+  wantedTestPa(facts.workingPressurePa, test.firstTest ? 'first' : 'repeat');
 
 function whyNotValid(facts: BoilerFacts, record: SurveyRecord, test: HydraulicTest): string | null {
   const asked = askedPa(facts, test);
@@ -71,7 +72,8 @@ function whyNotValid(facts: BoilerFacts, record: SurveyRecord, test: HydraulicTe
   if (glands.length > 0) return `A gland was not cured (${leakText(glands)}); make it dry and try again.`;
   if (!test.filledAndVented) return 'It is not recorded that the boiler was filled and all air let out.';
   const scales = instrumentsOf(record, 'test-gauge').flatMap(({ fullScalePa }) => fullScalePa ?? []);
-  const isInRange = (scale: number) => scale * 10 >= test.wantedPa * 15 && scale <= test.wantedPa * 4;
+  const { least, most } = gaugeWindowPa(test.wantedPa);
+  const isInRange = (scale: number) => scale >= least && scale <= most;
   if (scales.length > 0 && !scales.some(isInRange))
     return 'The test gauge’s full scale is not between 1.5 and 4 times the test pressure.';
   return null;

@@ -2,7 +2,12 @@ import type { BoilerFacts } from '../boilers/boiler.ts';
 import { check, figure, isAbove } from './check.ts';
 import { figureOf } from './examined.ts';
 import type { Examined, SurveyInput } from './examined.ts';
-import { allowableStressPa, barrelPressurePa, fluePressurePa, stayedPlatePressurePa } from './strength.ts';
+import {
+  allowableStressPa,
+  barrelPressurePa,
+  fluePressurePa,
+  stayedPlatePressurePa,
+} from '../engineering/strength.ts';
 import type { EngineeringCheck } from './result.ts';
 import { lengthText, pressureText } from './words.ts';
 

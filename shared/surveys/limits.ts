@@ -1,3 +1,5 @@
+import { testMultiplesPercent } from '../engineering/hydraulic-test.ts';
+
 /** Figures of the method that are policy rather than physics, with where each comes from. Published with the method. */
 export const limits = {
   gradePoints: { sound: 100, serviceable: 75, attention: 40, unfit: 0 },
@@ -11,8 +13,8 @@ export const limits = {
   oneWayFactor: 0.5,
   calibrationMonths: 12,
   /** Hydraulic test: multiples of working pressure as quoted from the UK hobby code of 2012; the local code governs. */
-  firstTestPercent: 200,
-  repeatTestPercent: 150,
+  firstTestPercent: testMultiplesPercent.first,
+  repeatTestPercent: testMultiplesPercent.repeat,
   testOverPercent: 6,
   /** Common practice; small heating-boiler makers print the same. */
   holdMinutes: 10,

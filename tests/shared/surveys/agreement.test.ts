@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { agreementOf } from '#shared/surveys/agreement.ts';
-import { quadraticKappa } from '#shared/surveys/kappa.ts';
+import { quadraticKappa } from '#shared/engineering/kappa.ts';
 import { anySurvey } from './arbitrary.ts';
 import { goodSurvey, withFinding } from './example.ts';
 

@@ -6,7 +6,7 @@ import {
   barrelPressurePa,
   fluePressurePa,
   stayedPlatePressurePa,
-} from '#shared/surveys/strength.ts';
+} from '#shared/engineering/strength.ts';
 import { goodFacts, goodSteam, goodSurvey, withFinding } from './example.ts';
 
 const bar = 100_000;
@@ -29,7 +29,7 @@ const unproved = (survey: SurveyInput): SurveyInput => ({
 describe('strength of the parts', () => {
   it('takes copper’s stress from the published table, falling as it gets hotter', () => {
     // Copper Development Association tube handbook: 4700 psi at 300 °F, which is steam at 3.61 bar gauge.
-    expect(allowableStressPa('copper', 361_000)).toBeCloseTo(4_700 * psi, 0);
+    expect(Math.abs((allowableStressPa('copper', 361_000) ?? 0) / (4_700 * psi) - 1)).toBeLessThan(0.001);
     const stresses = [1, 3, 6, 9, 12, 16].map((bars) => allowableStressPa('copper', bars * bar) ?? 0);
     expect(stresses).toEqual(stresses.toSorted((a, b) => b - a));
     expect(allowableStressPa('copper', 17 * bar)).toBeNull();
