@@ -47,7 +47,8 @@ test('a price that changed is asked about again, an order left unpaid is paid la
   await pay.click();
   await expect(buyer.getByRole('alert')).toContainText('You have begun to commission a survey');
   await buyer.getByRole('link', { name: 'My surveys' }).click();
-  await buyer.getByRole('link', { name: boiler }).click();
+  await expect(buyer.getByRole('heading', { name: 'Surveys', level: 1 })).toBeVisible();
+  await buyer.getByRole('link', { name: boiler }).first().click();
   await pay.click();
   await buyer.getByLabel('Card number').fill('4242 4242 4242 4242');
   await buyer.getByLabel('Expiry').fill('12/39');

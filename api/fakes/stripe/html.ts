@@ -26,5 +26,5 @@ td form{display:inline;margin:0}.row{display:flex;gap:.5rem;flex-wrap:wrap}.row 
 /** A whole page; the stand-in has no scripts. */
 export const page = (title: string, body: string, isWide = false): string => `<!doctype html>
 <html lang="en-GB"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width,initial-scale=1">
-<title>${escape(title)}</title><link rel="stylesheet" href="/style.css"></head>
+<title>${escape(title)}</title><link rel="icon" href="data:,"><link rel="stylesheet" href="/style.css"></head>
 <body><main${isWide ? ' class="wide"' : ''}>${body}</main></body></html>`;
