@@ -43,7 +43,9 @@ export function ErrorPage({ isWhole = false }: { isWhole?: boolean }) {
   const location = useLocation();
   const client = useQueryClient();
   const { title, detail, instance } = wordsFor(error);
-  const mustSignIn = error instanceof Problem && error.slug === 'not-signed-in';
+  const slug = error instanceof Problem ? error.slug : undefined;
+  const mustSignIn = slug === 'not-signed-in';
+  const mustEnrol = slug === 'second-factor-required';
   useEffect(() => {
     // A failed answer must not be shown again from memory when the person comes back.
     client.removeQueries({ predicate: (query) => query.state.status === 'error' });
@@ -59,6 +61,10 @@ export function ErrorPage({ isWhole = false }: { isWhole?: boolean }) {
             to={`${sitePaths.signIn}?to=${encodeURIComponent(location.pathname + location.search)}`}
           >
             Sign in
+          </Link>
+        ) : mustEnrol ? (
+          <Link className="link" to={sitePaths.secondFactor}>
+            Set up a second factor
           </Link>
         ) : (
           <Button

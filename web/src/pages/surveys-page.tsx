@@ -46,7 +46,7 @@ export function Component() {
           {data.items.map((order) => (
             <li
               key={order.id}
-              className="relative grid gap-x-8 gap-y-1 py-4 sm:grid-cols-[4.5rem_minmax(0,5fr)_minmax(0,4fr)_11rem]"
+              className="relative grid gap-x-8 gap-y-1 py-4 sm:grid-cols-[4.5rem_minmax(0,5fr)_minmax(0,3fr)_14rem]"
             >
               <div className="hidden sm:block">
                 {order.listing.cover && <Photo photo={order.listing.cover} sizes="72px" shape="1/1" />}

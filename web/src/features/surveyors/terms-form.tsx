@@ -98,6 +98,7 @@ export function TermsForm({ terms, townInput }: Props) {
         }, at('#/townId'))}
         <QuantityInput
           label="How far you go, one way"
+          hint="As the crow flies"
           quantity="distance"
           value={draft.rangeKm}
           error={at('#/rangeKm')}
