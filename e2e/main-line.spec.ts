@@ -173,8 +173,8 @@ async function examine(page: Page): Promise<void> {
     await page.getByLabel(caution).check();
   for (const [minute, pressure] of [
     [0, 0],
-    [4, 121],
-    [15, 120.5],
+    [4, 91],
+    [15, 90.5],
   ]) {
     await page.getByLabel('Pressure', { exact: true }).fill(String(pressure));
     await page.getByLabel('Minute', { exact: true }).fill(String(minute));

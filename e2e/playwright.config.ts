@@ -44,7 +44,7 @@ export default defineConfig({
     },
   },
   webServer: {
-    command: 'node --import tsx api/cli/start.ts',
+    command: 'exec node --import tsx api/cli/start.ts',
     cwd: root,
     url: `http://localhost:${String(port)}/api/ready`,
     timeout: 240_000,

@@ -4,11 +4,13 @@ import type { Listing } from '#shared/listings/contract.ts';
 import { laggingAnswers } from '#shared/listings/draft.ts';
 import { listingStatusLabels } from '#shared/listings/machine.ts';
 import { sitePaths } from '#shared/site-paths.ts';
+import { useMe } from '#web/features/accounts/use-me.ts';
 import { FittingsAndPapers, Implied, Nameplate, Sizes } from '#web/features/listings/facts.tsx';
 import { listingQueries } from '#web/features/listings/queries.ts';
 import { ReportsList } from '#web/features/listings/reports-list.tsx';
 import { SellerActions } from '#web/features/listings/seller-actions.tsx';
 import { unknownsOf } from '#web/features/listings/unknowns.ts';
+import { TakeDown } from '#web/features/office/take-down.tsx';
 import { formatDay, formatInstant, formatMoney, formatRough } from '#web/lib/format.ts';
 import { ButtonLink } from '#web/ui/button.tsx';
 import { Caution, Notice } from '#web/ui/notes.tsx';
@@ -84,6 +86,7 @@ export function Component() {
   const { data: listing } = useSuspenseQuery(listingQueries.detail(slug));
   const { facts, declaration } = listing;
   const unknowns = unknownsOf(facts);
+  const isOffice = useMe()?.roles.includes('office') ?? false;
   return (
     <Page
       title={listing.title}
@@ -94,6 +97,7 @@ export function Component() {
         <PhotoViewer photos={listing.photos} title={listing.title} />
         <div className="grid content-start gap-6">
           <Offer listing={listing} />
+          {isOffice && <TakeDown id={listing.id} status={listing.status} />}
           <Nameplate facts={facts} />
           <Caution title="No certificate.">
             Nothing on this page says that the boiler may be steamed. Your club’s or insurer’s boiler

@@ -47,3 +47,14 @@ export function useChangeRole(memberId: string) {
       client.invalidateQueries({ queryKey: officeQueries.all }),
   });
 }
+
+export function useMoveListing(listingId: string) {
+  return useMutation({
+    mutationFn: (body: BodyOf<typeof contract.moveListingByOffice>) =>
+      call(contract.moveListingByOffice, { params: { id: listingId }, body }),
+    onSuccess: async (_answer, _body, _context, { client }) => {
+      await client.invalidateQueries({ queryKey: ['listings'] });
+      await client.invalidateQueries({ queryKey: officeQueries.all });
+    },
+  });
+}
