@@ -78,7 +78,7 @@ export function partsPressure({ facts }: SurveyInput, items: readonly Examined[]
   const make = check('parts-pressure', 'What the parts will stand', weakest?.criterionId ?? 'shell.barrel');
   if (weakest === undefined)
     return make.cannotSay(
-      allowableStressPa(input.facts.material, input.facts.workingPressurePa) === null
+      allowableStressPa(facts.material, facts.workingPressurePa) === null
         ? 'Cannot be worked out: no allowable stress is published here for this metal at that temperature.'
         : 'Cannot be worked out: measure the wall of barrel, flue and plates.',
     );
