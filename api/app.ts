@@ -28,6 +28,12 @@ import { createMetrics, requestLog } from './http/request-log.ts';
 
 const webDir = path.resolve(import.meta.dirname, '../dist/web');
 
+/** PostgreSQL keeps no NUL in a text; nobody types one. @throws SyntaxError, which is answered as a bad request. */
+const refuseNul = (_key: string, value: unknown): unknown => {
+  if (typeof value === 'string' && value.includes('\0')) throw new SyntaxError('NUL in a text');
+  return value;
+};
+
 /** Every request carries the context its handler works in, with the person who sent it. */
 const attachCtx =
   (deps: Deps): RequestHandler =>
@@ -93,7 +99,12 @@ export function createApp(deps: Deps): Express {
   app.use('/api/payments/notices', express.raw({ type: () => true, limit: '512kb' }), attachSystemCtx(deps));
   app.use(paymentNoticeRoutes);
 
-  app.use('/api', sameOriginOnly(publicUrl), express.json({ limit: '1mb' }), attachCtx(deps));
+  app.use(
+    '/api',
+    sameOriginOnly(publicUrl),
+    express.json({ limit: '1mb', reviver: refuseNul }),
+    attachCtx(deps),
+  );
   app.use('/media', attachCtx(deps));
   app.use(accountRoutes(deps.letters), placeRoutes, listingRoutes, photoRoutes(deps.uploadsDir));
   app.use(examinationRoutes, reportRoutes, methodRoutes(deps.rateFactor));
