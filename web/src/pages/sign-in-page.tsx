@@ -18,14 +18,16 @@ export function Component() {
   const navigate = useNavigate();
   const [asksForCode, setAsksForCode] = useState(false);
   const signIn = useSignIn();
+  // Its own, so that what goes wrong with a press is said beside the presses, and not beside the form too.
+  const press = useSignIn();
   const to = ownPath(search.get('to'));
   const client = useQueryClient();
   const goOn = async () => {
     const { me } = await client.fetchQuery(accountQueries.me());
     await navigate(me?.mustEnrol ? sitePaths.account : to, { replace: true });
   };
-  const enter = async (body: { email: string; password: string }) => {
-    const { twoFactorRedirect } = await signIn.mutateAsync(body);
+  const enter = async (by: typeof signIn, body: { email: string; password: string }) => {
+    const { twoFactorRedirect } = await by.mutateAsync(body);
     if (twoFactorRedirect) setAsksForCode(true);
     else await goOn();
   };
@@ -36,7 +38,7 @@ export function Component() {
         <TotpForm onDone={() => void goOn()} />
       ) : (
         <div className="grid gap-8">
-          <SignInForm onSubmit={enter} />
+          <SignInForm onSubmit={(body) => enter(signIn, body)} />
           <p className="flex flex-wrap gap-x-6 gap-y-2">
             <Link className="link" to={`${sitePaths.signUp}?to=${encodeURIComponent(to)}`}>
               Join Tubeplate
@@ -54,11 +56,11 @@ export function Component() {
                   <li key={email}>
                     <button
                       type="button"
-                      disabled={signIn.isPending}
+                      disabled={press.isPending}
                       className="flex min-h-12 w-full flex-wrap items-baseline justify-between gap-x-4 py-2 text-left hover:bg-wash disabled:opacity-60"
                       onClick={() => {
                         // The mutation keeps the error and the page shows it below.
-                        enter({ email, password }).catch(() => undefined);
+                        enter(press, { email, password }).catch(() => undefined);
                       }}
                     >
                       <span className="font-medium text-copper underline underline-offset-4">{part}</span>
@@ -69,7 +71,7 @@ export function Component() {
                   </li>
                 ))}
               </ul>
-              {signIn.isError && <Notice kind="bad">{messageOf(signIn.error)}</Notice>}
+              {press.isError && <Notice kind="bad">{messageOf(press.error)}</Notice>}
             </section>
           )}
         </div>
