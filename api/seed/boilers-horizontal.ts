@@ -283,14 +283,14 @@ export const horizontalBoilers: SeedBoiler[] = [
         view: 'whole',
         alt: 'Green horizontal boiler with gas hose and chimney, seen from the other side.',
         mirror: true,
-        repaint: { from: 350, to: 140 },
+        repaint: { from: 350, to: 140, reach: 24 },
       },
       {
         file: 'g2-horizontal-gas-boiler-burner-end',
         view: 'burner',
         alt: 'Burner end of a green horizontal boiler.',
         mirror: true,
-        repaint: { from: 350, to: 140 },
+        repaint: { from: 350, to: 140, reach: 24 },
       },
       {
         file: 'k04-pressure-gauge-half-scale',

@@ -13,7 +13,7 @@ export interface SeedPicture {
   /** Mirrored left to right. */
   mirror?: boolean;
   /** Repaints what is of one hue, degrees: a casing, and not the bench it stands on. */
-  repaint?: { from: number; to: number };
+  repaint?: { from: number; to: number; reach: number };
   brightness?: number;
   /** Part of the picture to keep, as shares of its width and height. */
   crop?: { left: number; top: number; width: number; height: number };
@@ -43,11 +43,13 @@ export async function readPicture({ file, mirror, repaint, brightness, crop }: S
   return image.jpeg({ quality: 88 }).toBuffer();
 }
 
-/** How far from the hue repainted a pixel may be, degrees, and how strong its colour must be. */
-const reach = 24;
-const leastSaturation = 0.42;
+/** How strong the colour of a pixel must be to count as paint. */
+const leastSaturation = 0.3;
 
-async function repainted(image: Sharp, { from, to }: { from: number; to: number }): Promise<Buffer> {
+async function repainted(
+  image: Sharp,
+  { from, to, reach }: { from: number; to: number; reach: number },
+): Promise<Buffer> {
   const { data, info } = await image.removeAlpha().raw().toBuffer({ resolveWithObject: true });
   for (let at = 0; at < data.length; at += 3) {
     const [red = 0, green = 0, blue = 0] = data.subarray(at, at + 3);

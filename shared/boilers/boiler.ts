@@ -87,13 +87,23 @@ export const paperKinds = {
 export const paperKindId = z.enum(Object.keys(paperKinds) as [PaperKindId, ...PaperKindId[]]);
 export type PaperKindId = keyof typeof paperKinds;
 
-const lengthMm = (least: number, most: number, sentence: string) =>
-  z.number('Give a figure').min(least, sentence).max(most, sentence);
+const lengthMm = (least: number, most: number, sentence: string, missing = 'Give a figure') =>
+  z.number(missing).min(least, sentence).max(most, sentence);
 
 /** Sizes of a boiler; millimetres and litres. What the seller could not measure is left out, never guessed. */
 export const dimensions = z.strictObject({
-  barrelOutsideDiameterMm: lengthMm(20, 1_000, 'A model boiler’s barrel is between 20 and 1,000 mm across'),
-  barrelLengthMm: lengthMm(20, 3_000, 'A model boiler’s barrel is between 20 and 3,000 mm long'),
+  barrelOutsideDiameterMm: lengthMm(
+    20,
+    1_000,
+    'A model boiler’s barrel is between 20 and 1,000 mm across',
+    'Give the outside diameter of the barrel',
+  ),
+  barrelLengthMm: lengthMm(
+    20,
+    3_000,
+    'A model boiler’s barrel is between 20 and 3,000 mm long',
+    'Give the length of the barrel',
+  ),
   barrelThicknessMm: lengthMm(0.3, 25, 'A wall is between 0.3 and 25 mm thick').nullable().default(null),
   endPlateThicknessMm: lengthMm(0.3, 25, 'A plate is between 0.3 and 25 mm thick').nullable().default(null),
   flueDiameterMm: lengthMm(5, 600, 'A flue is between 5 and 600 mm across').nullable().default(null),

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { Link } from 'react-router-dom';
 import { Mark } from './mark.tsx';
 
 /** A caution where the act is. */
@@ -57,12 +58,16 @@ export function ErrorSummary({ title, mistakes }: { title: string; mistakes: rea
       <ul className="mt-1 list-disc pl-5">
         {mistakes.map(({ message, href }) => (
           <li key={(href ?? '') + message}>
-            {href ? (
+            {href === undefined ? (
+              message
+            ) : href.startsWith('#') ? (
               <a href={href} className="link">
                 {message}
               </a>
             ) : (
-              message
+              <Link to={href} className="link">
+                {message}
+              </Link>
             )}
           </li>
         ))}

@@ -91,19 +91,21 @@ export function Uploader({ purpose, recordId, view, onUploaded }: Props) {
     };
   }, [uppy, onUploaded]);
   return (
-    <Dashboard
-      uppy={uppy}
-      width="100%"
-      height={260}
-      theme={isDark() ? 'dark' : 'light'}
-      proudlyDisplayPoweredByUppy={false}
-      showRemoveButtonAfterComplete
-      doneButtonHandler={undefined}
-      note={
-        purpose === 'listing-document'
-          ? 'PDF, JPEG or PNG, up to 15 MB'
-          : 'JPEG, PNG, WebP, AVIF or TIFF, up to 40 MB'
-      }
-    />
+    <div className="uploader">
+      <Dashboard
+        uppy={uppy}
+        width="100%"
+        height={260}
+        theme={isDark() ? 'dark' : 'light'}
+        proudlyDisplayPoweredByUppy={false}
+        showRemoveButtonAfterComplete
+        doneButtonHandler={undefined}
+        note={
+          purpose === 'listing-document'
+            ? 'PDF, JPEG or PNG, up to 15 MB'
+            : 'JPEG, PNG, WebP, AVIF or TIFF, up to 40 MB'
+        }
+      />
+    </div>
   );
 }
