@@ -52,7 +52,9 @@ export function splitMoney(total: Money, weights: readonly number[]): Money[] {
   const left = Number(BigInt(total.minor) - shares.reduce((all, share) => all + share, 0n));
   const order = remainders
     .map((remainder, index) => ({ remainder, index }))
-    .toSorted((a, b) => (a.remainder === b.remainder ? a.index - b.index : a.remainder > b.remainder ? -1 : 1))
+    .toSorted((a, b) =>
+      a.remainder === b.remainder ? a.index - b.index : a.remainder > b.remainder ? -1 : 1,
+    )
     .slice(0, left);
   const extra = new Set(order.map((entry) => entry.index));
   return shares.map((share, index) => ({

@@ -42,5 +42,7 @@ test('a letter arrives whole by SMTP, with its calendar file and the caution at 
 
 test('a letter that cannot be handed over is not lost in silence', async () => {
   const mailer = createMailer({ host: '127.0.0.1', port: 1, from: 'desk@tubeplate.example' });
-  await expect(mailer.send({ to: 'a@example.test', subject: 'x', text: 'y' })).rejects.toThrow('ECONNREFUSED');
+  await expect(mailer.send({ to: 'a@example.test', subject: 'x', text: 'y' })).rejects.toThrow(
+    'ECONNREFUSED',
+  );
 });
