@@ -57,6 +57,7 @@ function firstLoad(): void {
 /** A 24-megapixel picture to all variants, against plain sharp making the same files. */
 async function pictures(site: Site): Promise<void> {
   const seller = await site.givenPerson('Bench Photographer');
+  const { id: listingId } = await givenListing(site, seller);
   const noise = { type: 'gaussian', mean: 128, sigma: 30 } as const;
   const buffer = Buffer.from(
     await sharp({ create: { width: 6_000, height: 4_000, channels: 3, background: '#888', noise } })
@@ -75,6 +76,7 @@ async function pictures(site: Site): Promise<void> {
   const oursFrom = performance.now();
   await addPhotoFromBuffer(site.ctxAs(), {
     ownerId: seller.id,
+    listingId,
     view: 'whole',
     alt: 'x',
     filename: 'x.jpg',
