@@ -27,7 +27,6 @@ export const isBefore = (a: Instant, b: Instant): boolean => fromParts(a) < from
 export const msBetween = (a: Instant, b: Instant): number => fromParts(b) - fromParts(a);
 /** The UTC day of an instant. */
 export const dayOf = (at: Instant): Day => toIso(fromParts(at)).slice(0, 10);
-export const dayPlus = (from: Day, days: number): Day => toIso(fromParts(from) + days * daysMs).slice(0, 10);
 /** Whole days from `a` to `b`. */
 export const daysBetween = (a: Day, b: Day): number => Math.round((fromParts(b) - fromParts(a)) / daysMs);
 

@@ -12,5 +12,9 @@ export function napierKgPerH(of: { areaMm2: number; pressurePaAbs: number }): nu
 /** Share of the bore's area that each class of lift opens: D/24, D/12, D/4 (Indian Boiler Regulations). */
 export const liftShares = { ordinary: 1 / 6, high: 1 / 3, full: 1 } as const;
 
+/** How far above working pressure full fire may take it with the valve lifting, per cent. */
+export const accumulationPercent = 10;
+
 /** Pressure that full fire may reach with the valve lifting: working pressure and a tenth (UK hobby code, IBR). */
-export const mostWithValveLiftingPa = (workingPa: number): number => (workingPa * 110) / 100;
+export const mostWithValveLiftingPa = (workingPa: number): number =>
+  (workingPa * (100 + accumulationPercent)) / 100;

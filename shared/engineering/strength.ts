@@ -1,7 +1,6 @@
 import type { MaterialId } from '../boilers/boiler.ts';
 import { atmospherePa, saturationTemperatureK } from './steam.ts';
-
-const psi = 6_894.757_293;
+import { paPerPsi } from './units.ts';
 
 /**
  * Allowable stress of annealed copper, psi, by metal temperature, °F (Copper Development Association, Copper Tube
@@ -26,12 +25,12 @@ export function annealedCopperStressPa(temperatureK: number): number | null {
   const fahrenheit = Math.round((temperatureK * 1.8 - 459.67) * 1e6) / 1e6;
   const [first] = annealedCopper;
   if (first === undefined || Number.isNaN(fahrenheit)) return null;
-  if (fahrenheit <= first[0]) return first[1] * psi;
+  if (fahrenheit <= first[0]) return first[1] * paPerPsi;
   for (const [index, [right, high]] of annealedCopper.entries()) {
     const before = annealedCopper[index - 1];
     if (before !== undefined && fahrenheit <= right) {
       const share = (fahrenheit - before[0]) / (right - before[0]);
-      return (before[1] + (high - before[1]) * share) * psi;
+      return (before[1] + (high - before[1]) * share) * paPerPsi;
     }
   }
   return null;

@@ -1,7 +1,7 @@
-import { liftShares, napierKgPerH } from '../engineering/safety-valve.ts';
+import { liftShares, mostWithValveLiftingPa, napierKgPerH } from '../engineering/safety-valve.ts';
 import { atmospherePa } from '../engineering/steam.ts';
 import type { BoilerFacts } from '../boilers/boiler.ts';
-import { accumulation, mostPa } from './checks-steam.ts';
+import { accumulation } from './checks-steam.ts';
 import { check, figure } from './check.ts';
 import { figureOf, valuesOf } from './examined.ts';
 import type { Examined, SurveyInput } from './examined.ts';
@@ -49,7 +49,7 @@ export function valveCapacity(input: SurveyInput, items: readonly Examined[]): E
   const passes =
     napierKgPerH({
       areaMm2: (Math.PI / 4) * bore ** 2 * share,
-      pressurePaAbs: mostPa(input.facts.workingPressurePa) + atmospherePa,
+      pressurePaAbs: mostWithValveLiftingPa(input.facts.workingPressurePa) + atmospherePa,
     }) * Math.max(1, valves);
   const figures = [
     figure('Valve passes', tenths(passes), 'kg/h'),

@@ -1,3 +1,4 @@
+import { mostWithValveLiftingPa } from '../engineering/safety-valve.ts';
 import { check, figure, isAbove } from './check.ts';
 import { valuesOf } from './examined.ts';
 import type { Examined, SurveyInput } from './examined.ts';
@@ -5,16 +6,13 @@ import { limits } from './limits.ts';
 import type { EngineeringCheck } from './result.ts';
 import { pressureText } from './words.ts';
 
-/** Working pressure and a tenth: the most that a valve may let it rise to. */
-export const mostPa = (workingPa: number): number => (workingPa * (100 + limits.accumulationPercent)) / 100;
-
 const working = (pa: number) => figure('Claimed working pressure', pa, 'Pa');
 
 export function valveLift({ facts, record }: SurveyInput): EngineeringCheck {
   const make = check('valve-lift', 'Safety valve lifts in time', 'safety.valve');
   const { steam } = record;
   if (steam?.raisedSteam !== true) return make.cannotSay('It was not tried under steam.');
-  const limit = mostPa(facts.workingPressurePa);
+  const limit = mostWithValveLiftingPa(facts.workingPressurePa);
   const lifts = steam.valveLiftsAtPa;
   if (lifts === null) {
     const highest = steam.highestPressurePa;
@@ -46,7 +44,7 @@ export function accumulation({ facts, record }: SurveyInput): EngineeringCheck {
   if (steam?.raisedSteam !== true || steam.highestPressurePa === null)
     return make.cannotSay('It was not tried with full fire and everything shut.');
   const highest = steam.highestPressurePa;
-  const limit = mostPa(facts.workingPressurePa);
+  const limit = mostWithValveLiftingPa(facts.workingPressurePa);
   const figures = [figure('Highest pressure', highest, 'Pa'), working(facts.workingPressurePa)];
   if (isAbove(highest, limit))
     return make.fail(

@@ -1,4 +1,5 @@
 import { testMultiplesPercent } from '../engineering/hydraulic-test.ts';
+import { accumulationPercent } from '../engineering/safety-valve.ts';
 
 /** Figures of the method that are policy rather than physics, with where each comes from. Published with the method. */
 export const limits = {
@@ -29,7 +30,7 @@ export const limits = {
   coShortTermPpm: 100,
   coSource: 'UK workplace exposure limits EH40, short-term limit; from memory',
   /** Lift and accumulation above working pressure. */
-  accumulationPercent: 10,
+  accumulationPercent,
   /** Bar·litres from which a second means of feed is asked for; coal firing asks for one at any size. */
   secondFeedBarLitres: 3,
   secondFeedSource: 'common practice; the local code governs',

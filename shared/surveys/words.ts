@@ -1,6 +1,8 @@
+import { paPerBar, paPerPsi } from '../engineering/units.ts';
+
 /** A gauge pressure in both the units in use, for a sentence. */
 export const pressureText = (pa: number): string =>
-  `${(pa / 100_000).toFixed(1)} bar (${String(Math.round(pa / 6_894.757_293))} psi)`;
+  `${(pa / paPerBar).toFixed(1)} bar (${String(Math.round(pa / paPerPsi))} psi)`;
 
 export const lengthText = (mm: number): string => `${trim(mm, 2)} mm`;
 export const rateText = (kgPerH: number): string => `${trim(kgPerH, 1)} kg/h`;

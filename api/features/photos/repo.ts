@@ -93,15 +93,6 @@ export async function findPhoto(db: Db, id: string): Promise<StoredPhoto | undef
   return row && toStored(row);
 }
 
-export async function listPhotos(db: Db, ids: readonly string[]): Promise<StoredPhoto[]> {
-  if (ids.length === 0) return [];
-  const rows = await db
-    .select()
-    .from(photos)
-    .where(and(inArray(photos.id, [...ids]), kept));
-  return rows.map(toStored);
-}
-
 /** In the seller's order, the cover first. */
 export async function listPhotosOfListings(db: Db, ids: readonly string[]): Promise<Map<string, Photo[]>> {
   const found = new Map<string, Photo[]>(ids.map((id) => [id, []]));

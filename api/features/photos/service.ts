@@ -11,8 +11,6 @@ import { makeDocument, makePhoto } from './pictures.ts';
 import * as repo from './repo.ts';
 import type { StoredPhoto } from './repo.ts';
 
-export type { StoredPhoto } from './repo.ts';
-
 const originalKey = (id: string) => `originals/${id}`;
 const documentKey = (id: string) => `documents/${id}`;
 const variantKey = (id: string, width: number, format: string) => `variants/${id}/${String(width)}.${format}`;
@@ -313,10 +311,6 @@ export const listPhotosOfListing = async (ctx: Ctx, id: string): Promise<Photo[]
 
 export const listPhotosOfOrder = (ctx: Ctx, orderId: string): Promise<Photo[]> =>
   repo.listPhotosOfOrder(ctx.db, orderId);
-
-/** Photographs by id, in no order; those removed are left out. */
-export const findPhotos = (ctx: Ctx, ids: readonly string[]): Promise<StoredPhoto[]> =>
-  repo.listPhotos(ctx.db, ids);
 
 export const listDocumentsOfListings = (
   ctx: Ctx,

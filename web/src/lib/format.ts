@@ -1,4 +1,12 @@
 import type { Units } from '#shared/accounts/contract.ts';
+import {
+  kgPerPound,
+  kmPerMile,
+  litresPerPint,
+  mmPerInch,
+  paPerBar,
+  paPerPsi,
+} from '#shared/engineering/units.ts';
 import type { Money } from '#shared/money.ts';
 
 const locale = 'en-GB';
@@ -55,20 +63,19 @@ export function formatFromNow(at: string, now: Date = new Date()): string {
   return words.format(Math.round(minutes / 1_440), 'day');
 }
 
-/** Exact, NIST SP 811: 1 lbf/in² = 6 894.757 Pa, 1 in = 25.4 mm; imperial gallon 4.546 09 L; pound 0.453 592 37 kg. */
 const factors = {
   pressure: {
-    imperial: { per: 6_894.757_293_168, unit: 'psi', digits: 0 },
-    metric: { per: 100_000, unit: 'bar', digits: 2 },
+    imperial: { per: paPerPsi, unit: 'psi', digits: 0 },
+    metric: { per: paPerBar, unit: 'bar', digits: 2 },
   },
-  length: { imperial: { per: 25.4, unit: 'in', digits: 3 }, metric: { per: 1, unit: 'mm', digits: 1 } },
+  length: { imperial: { per: mmPerInch, unit: 'in', digits: 3 }, metric: { per: 1, unit: 'mm', digits: 1 } },
   volume: {
-    imperial: { per: 0.568_261_25, unit: 'pints', digits: 2 },
+    imperial: { per: litresPerPint, unit: 'pints', digits: 2 },
     metric: { per: 1, unit: 'litres', digits: 2 },
   },
-  mass: { imperial: { per: 0.453_592_37, unit: 'lb', digits: 1 }, metric: { per: 1, unit: 'kg', digits: 1 } },
+  mass: { imperial: { per: kgPerPound, unit: 'lb', digits: 1 }, metric: { per: 1, unit: 'kg', digits: 1 } },
   distance: {
-    imperial: { per: 1.609_344, unit: 'miles', digits: 0 },
+    imperial: { per: kmPerMile, unit: 'miles', digits: 0 },
     metric: { per: 1, unit: 'km', digits: 0 },
   },
 } as const;

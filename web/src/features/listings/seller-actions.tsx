@@ -3,8 +3,8 @@ import { sitePaths } from '#shared/site-paths.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { Button, ButtonLink } from '#web/ui/button.tsx';
 import { Dialog } from '#web/ui/dialog.tsx';
-import { Field } from '#web/ui/field.tsx';
 import { Notice } from '#web/ui/notes.tsx';
+import { ReasonForm } from '#web/ui/reason-form.tsx';
 import { useMoveListing } from './queries.ts';
 
 /** What the seller may do with a listing. */
@@ -39,7 +39,7 @@ export function SellerActions({ id, events }: { id: string; events: readonly str
           </Button>
         )}
       </div>
-      {move.isError && <Notice kind="bad">{messageOf(move.error)}</Notice>}
+      {move.isError && !isAsking && <Notice kind="bad">{messageOf(move.error)}</Notice>}
       <Dialog
         title="Withdraw this boiler"
         isOpen={isAsking}
@@ -47,10 +47,15 @@ export function SellerActions({ id, events }: { id: string; events: readonly str
           setIsAsking(false);
         }}
       >
-        <form
-          className="grid gap-4"
-          onSubmit={(event) => {
-            event.preventDefault();
+        <ReasonForm
+          hint="Kept in the record"
+          label="Withdraw it"
+          isOptional
+          reason={reason}
+          onReason={setReason}
+          isPending={move.isPending}
+          error={move.error}
+          onSubmit={() => {
             move.mutate(
               { event: 'withdraw', reason },
               {
@@ -61,25 +66,8 @@ export function SellerActions({ id, events }: { id: string; events: readonly str
             );
           }}
         >
-          <p>It goes from the list at once. You can list it again. Surveys under way go on.</p>
-          <Field label="Why" hint="Kept in the record">
-            {(control) => (
-              <input
-                {...control}
-                value={reason}
-                maxLength={400}
-                onChange={(event) => {
-                  setReason(event.target.value);
-                }}
-              />
-            )}
-          </Field>
-          <div>
-            <Button kind="danger" type="submit" isPending={move.isPending}>
-              Withdraw it
-            </Button>
-          </div>
-        </form>
+          It goes from the list at once. You can list it again. Surveys under way go on.
+        </ReasonForm>
       </Dialog>
     </div>
   );

@@ -4,11 +4,9 @@ import { roles } from '#shared/accounts/roles.ts';
 import type { Role } from '#shared/accounts/roles.ts';
 import type { officeMember } from '#shared/office/contract.ts';
 import { formatDay } from '#web/lib/format.ts';
-import { messageOf } from '#web/lib/form-problem.ts';
 import { Button } from '#web/ui/button.tsx';
 import { Dialog } from '#web/ui/dialog.tsx';
-import { Field } from '#web/ui/field.tsx';
-import { Notice } from '#web/ui/notes.tsx';
+import { ReasonForm } from '#web/ui/reason-form.tsx';
 import { useChangeRole } from './queries.ts';
 
 type Member = z.infer<typeof officeMember>;
@@ -17,12 +15,10 @@ type Member = z.infer<typeof officeMember>;
 export function MemberRow({ member }: { member: Member }) {
   const [asked, setAsked] = useState<{ role: Role; change: 'grant' | 'withdraw' }>();
   const [reason, setReason] = useState('');
-  const [isShort, setIsShort] = useState(false);
   const changeRole = useChangeRole(member.id);
   const close = () => {
     setAsked(undefined);
     setReason('');
-    setIsShort(false);
     changeRole.reset();
   };
   const words = asked
@@ -55,44 +51,20 @@ export function MemberRow({ member }: { member: Member }) {
         })}
       </div>
       <Dialog title={words} isOpen={asked !== undefined} onClose={close}>
-        <form
-          className="grid gap-4"
-          noValidate
-          onSubmit={(event) => {
-            event.preventDefault();
-            setIsShort(reason.trim().length < 3);
-            if (reason.trim().length < 3) return;
+        <ReasonForm
+          hint="Kept in the record"
+          label={words}
+          kind={asked?.change === 'withdraw' ? 'danger' : 'primary'}
+          reason={reason}
+          onReason={setReason}
+          isPending={changeRole.isPending}
+          error={changeRole.error}
+          onSubmit={() => {
             if (asked) changeRole.mutate({ ...asked, reason }, { onSuccess: close });
           }}
         >
-          <p>{member.name}. It takes effect at their next request.</p>
-          {changeRole.isError && <Notice kind="bad">{messageOf(changeRole.error)}</Notice>}
-          <Field
-            label="Why"
-            hint="Kept in the record"
-            error={isShort && reason.trim().length < 3 ? 'Give a reason in a few words' : undefined}
-          >
-            {(control) => (
-              <input
-                {...control}
-                maxLength={400}
-                value={reason}
-                onChange={(event) => {
-                  setReason(event.target.value);
-                }}
-              />
-            )}
-          </Field>
-          <div>
-            <Button
-              type="submit"
-              kind={asked?.change === 'withdraw' ? 'danger' : 'primary'}
-              isPending={changeRole.isPending}
-            >
-              {words}
-            </Button>
-          </div>
-        </form>
+          {member.name}. It takes effect at their next request.
+        </ReasonForm>
       </Dialog>
     </li>
   );

@@ -48,7 +48,7 @@ export function useChangeRole(memberId: string) {
   });
 }
 
-export function useMoveListing(listingId: string) {
+export function useMoveListingByOffice(listingId: string) {
   return useMutation({
     mutationFn: (body: BodyOf<typeof contract.moveListingByOffice>) =>
       call(contract.moveListingByOffice, { params: { id: listingId }, body }),

@@ -1,83 +1,55 @@
 import { useState } from 'react';
 import type { ListingStatus } from '#shared/listings/machine.ts';
-import { messageOf } from '#web/lib/form-problem.ts';
 import { Button } from '#web/ui/button.tsx';
 import { Dialog } from '#web/ui/dialog.tsx';
-import { Field } from '#web/ui/field.tsx';
-import { Notice } from '#web/ui/notes.tsx';
-import { useMoveListing } from './queries.ts';
+import { ReasonForm } from '#web/ui/reason-form.tsx';
+import { useMoveListingByOffice } from './queries.ts';
+
+const acts = {
+  takeDown: {
+    label: 'Take it down',
+    kind: 'danger',
+    follows: 'Its page is then closed to all but its seller, the office and those with a survey of it.',
+  },
+  restore: { label: 'Put it back', kind: 'primary', follows: 'Its page is then open to everyone again.' },
+} as const;
 
 /** The office takes a listing down, or puts it back, with a reason for the record. */
 export function TakeDown({ id, status }: { id: string; status: ListingStatus }) {
   const [isOpen, setIsOpen] = useState(false);
   const [reason, setReason] = useState('');
-  const move = useMoveListing(id);
+  const move = useMoveListingByOffice(id);
   const event = status === 'taken-down' ? 'restore' : 'takeDown';
-  const label = event === 'restore' ? 'Put it back' : 'Take it down';
+  const { label, kind, follows } = acts[event];
   if (!['published', 'withdrawn', 'taken-down'].includes(status)) return null;
+  const close = () => {
+    setIsOpen(false);
+  };
   return (
     <>
       <Button
-        kind={event === 'restore' ? 'quiet' : 'danger'}
+        kind={kind === 'primary' ? 'quiet' : kind}
         onClick={() => {
           setIsOpen(true);
         }}
       >
         {label}
       </Button>
-      <Dialog
-        title={label}
-        isOpen={isOpen}
-        onClose={() => {
-          setIsOpen(false);
-        }}
-      >
-        <form
-          className="grid gap-4"
-          onSubmit={(submitted) => {
-            submitted.preventDefault();
-            move.mutate(
-              { event, reason },
-              {
-                onSuccess: () => {
-                  setIsOpen(false);
-                },
-              },
-            );
+      <Dialog title={label} isOpen={isOpen} onClose={close}>
+        <ReasonForm
+          hint="Kept in the record, and shown to the seller"
+          label={label}
+          kind={kind}
+          reason={reason}
+          onReason={setReason}
+          isPending={move.isPending}
+          error={move.error}
+          onSubmit={() => {
+            move.mutate({ event, reason }, { onSuccess: close });
           }}
         >
-          <p>
-            Its page is then{' '}
-            {event === 'restore'
-              ? 'open to everyone again'
-              : 'closed to all but its seller, the office and those with a survey of it'}
-            . Surveys under way go on.
-          </p>
-          {move.isError && <Notice kind="bad">{messageOf(move.error)}</Notice>}
-          <Field label="Why" hint="Kept in the record, and shown to the seller">
-            {(control) => (
-              <input
-                {...control}
-                required
-                minLength={3}
-                maxLength={400}
-                value={reason}
-                onChange={(typed) => {
-                  setReason(typed.target.value);
-                }}
-              />
-            )}
-          </Field>
-          <div>
-            <Button
-              type="submit"
-              kind={event === 'restore' ? 'primary' : 'danger'}
-              isPending={move.isPending}
-            >
-              {label}
-            </Button>
-          </div>
-        </form>
+          {follows} Surveys under way go on.
+        </ReasonForm>
       </Dialog>
     </>
   );

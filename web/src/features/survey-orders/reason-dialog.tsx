@@ -1,10 +1,8 @@
 import { useState } from 'react';
 import type { ReactNode } from 'react';
-import { messageOf } from '#web/lib/form-problem.ts';
 import { Button } from '#web/ui/button.tsx';
 import { Dialog } from '#web/ui/dialog.tsx';
-import { Field } from '#web/ui/field.tsx';
-import { Notice } from '#web/ui/notes.tsx';
+import { ReasonForm } from '#web/ui/reason-form.tsx';
 import { useOrderAct } from './queries.ts';
 
 interface Props {
@@ -20,8 +18,10 @@ interface Props {
 export function ReasonDialog({ act, orderId, label, children }: Props) {
   const [isOpen, setIsOpen] = useState(false);
   const [reason, setReason] = useState('');
-  const [isShort, setIsShort] = useState(false);
   const doIt = useOrderAct(act, orderId);
+  const close = () => {
+    setIsOpen(false);
+  };
   return (
     <>
       <Button
@@ -32,55 +32,20 @@ export function ReasonDialog({ act, orderId, label, children }: Props) {
       >
         {label}
       </Button>
-      <Dialog
-        title={label}
-        isOpen={isOpen}
-        onClose={() => {
-          setIsOpen(false);
-        }}
-      >
-        <form
-          className="grid gap-4"
-          noValidate
-          onSubmit={(event) => {
-            event.preventDefault();
-            setIsShort(reason.trim().length < 3);
-            if (reason.trim().length < 3) return;
-            doIt.mutate(
-              { reason },
-              {
-                onSuccess: () => {
-                  setIsOpen(false);
-                },
-              },
-            );
+      <Dialog title={label} isOpen={isOpen} onClose={close}>
+        <ReasonForm
+          hint="The others read this"
+          label={label}
+          reason={reason}
+          onReason={setReason}
+          isPending={doIt.isPending}
+          error={doIt.error}
+          onSubmit={() => {
+            doIt.mutate({ reason }, { onSuccess: close });
           }}
         >
-          <div>{children}</div>
-          {doIt.isError && <Notice kind="bad">{messageOf(doIt.error)}</Notice>}
-          <Field
-            label="Why"
-            hint="The others read this"
-            error={isShort && reason.trim().length < 3 ? 'Give a reason in a few words' : undefined}
-          >
-            {(control) => (
-              <textarea
-                {...control}
-                rows={3}
-                maxLength={400}
-                value={reason}
-                onChange={(event) => {
-                  setReason(event.target.value);
-                }}
-              />
-            )}
-          </Field>
-          <div>
-            <Button kind="danger" type="submit" isPending={doIt.isPending}>
-              {label}
-            </Button>
-          </div>
-        </form>
+          {children}
+        </ReasonForm>
       </Dialog>
     </>
   );

@@ -13,6 +13,7 @@ import { LeakFields } from './leak-fields.tsx';
 import { ReadingsTable } from './readings-table.tsx';
 import { changeHydraulic, emptyHydraulic } from './record-edits.ts';
 import type { Edit } from './record-edits.ts';
+import { TestOrReason } from './test-or-reason.tsx';
 import { WordsInput } from './words-input.tsx';
 
 interface Props {
@@ -39,20 +40,14 @@ export function HydraulicScreen({ facts, scope, record, edit }: Props) {
         and your boiler inspector.
       </Caution>
       {test === null ? (
-        <>
-          <Button isWide onClick={start}>
-            Record a hydraulic test
-          </Button>
-          <WordsInput
-            label="Or say why there was none"
-            most={400}
-            rows={2}
-            value={record.noHydraulicReason}
-            onChange={(noHydraulicReason) => {
-              edit((so) => ({ ...so, noHydraulicReason }));
-            }}
-          />
-        </>
+        <TestOrReason
+          label="Record a hydraulic test"
+          onStart={start}
+          reason={record.noHydraulicReason}
+          onReason={(noHydraulicReason) => {
+            edit((so) => ({ ...so, noHydraulicReason }));
+          }}
+        />
       ) : (
         <TestFields
           facts={facts}

@@ -1,5 +1,5 @@
+import { mostWithValveLiftingPa } from '#shared/engineering/safety-valve.ts';
 import type { BoilerFacts } from '#shared/boilers/boiler.ts';
-import { limits } from '#shared/surveys/limits.ts';
 import type { SteamTest, SurveyRecord } from '#shared/surveys/record.ts';
 import { useUnits } from '#web/lib/units.tsx';
 import { Button } from '#web/ui/button.tsx';
@@ -9,6 +9,7 @@ import { FigureInput } from './figure-input.tsx';
 import { ReadingsTable } from './readings-table.tsx';
 import { changeSteam, emptySteam } from './record-edits.ts';
 import type { Edit } from './record-edits.ts';
+import { TestOrReason } from './test-or-reason.tsx';
 import { WordsInput } from './words-input.tsx';
 import { YesNo } from './yes-no.tsx';
 
@@ -29,25 +30,16 @@ export function SteamScreen({ facts, record, edit }: Props) {
           ' Fire out of doors or with the doors open, with a carbon monoxide meter at your face: it cannot be smelt. If it sounds, shut off the fuel and leave.'}
       </Caution>
       {test === null ? (
-        <>
-          <Button
-            isWide
-            onClick={() => {
-              edit((so) => ({ ...so, steam: emptySteam }));
-            }}
-          >
-            Record a steam test
-          </Button>
-          <WordsInput
-            label="Or say why there was none"
-            most={400}
-            rows={2}
-            value={record.noSteamReason}
-            onChange={(noSteamReason) => {
-              edit((so) => ({ ...so, noSteamReason }));
-            }}
-          />
-        </>
+        <TestOrReason
+          label="Record a steam test"
+          onStart={() => {
+            edit((so) => ({ ...so, steam: emptySteam }));
+          }}
+          reason={record.noSteamReason}
+          onReason={(noSteamReason) => {
+            edit((so) => ({ ...so, noSteamReason }));
+          }}
+        />
       ) : (
         <TestFields
           facts={facts}
@@ -73,7 +65,7 @@ interface TestProps {
 
 function TestFields({ facts, test, onChange, onRemove }: TestProps) {
   const { show } = useUnits();
-  const mostPa = (facts.workingPressurePa * (100 + limits.accumulationPercent)) / 100;
+  const mostPa = mostWithValveLiftingPa(facts.workingPressurePa);
   const pressure = { unit: 'Pa', min: 0, max: 6_000_000 } as const;
   return (
     <>
