@@ -114,7 +114,7 @@ export function recordOf(
     noSteamReason: '',
     hydraulic: hydraulic
       ? {
-          profileId: 'uk-hobby',
+          profileId: 'hobby',
           firstTest: hydraulic.firstTest,
           wantedPa: Math.round(facts.workingPressurePa * (hydraulic.firstTest ? 2 : 1.5)),
           gaugeRemoved: true,

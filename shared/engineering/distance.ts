@@ -1,7 +1,10 @@
+import { work } from './working.ts';
+import type { Line } from './working.ts';
+
 /** Mean radius of the earth, km, as the haversine formula is usually given it. */
 export const earthRadiusKm = 6_371;
 
-interface Place {
+export interface Place {
   /** Degrees north. */
   latitude: number;
   /** Degrees east. */
@@ -24,3 +27,22 @@ export function haversineKm(a: Place, b: Place, radiusKm: number = earthRadiusKm
   const chord = north + Math.cos(radians(a.latitude)) * Math.cos(radians(b.latitude)) * east;
   return 2 * radiusKm * Math.asin(Math.min(1, Math.sqrt(chord)));
 }
+
+/** The same, with its working. */
+export const distanceLine = (a: Place, b: Place): Line => {
+  haversineKm(a, b);
+  return work({
+    result: ['s', 'Distance over the ground', 'distance'],
+    formula: '2·{R}·asin((sin(({φ_2} − {φ_1}) / 2)² + cos({φ_1})·cos({φ_2})·sin(({λ_2} − {λ_1}) / 2)²)^0.5)',
+    terms: {
+      R: ['Radius of the earth', 'distance', earthRadiusKm],
+      φ_1: ['North, first place', 'degrees', a.latitude],
+      λ_1: ['East, first place', 'degrees', a.longitude],
+      φ_2: ['North, second place', 'degrees', b.latitude],
+      λ_2: ['East, second place', 'degrees', b.longitude],
+    },
+    compute: () => haversineKm(a, b),
+    source: 'haversine',
+    holds: 'Within half a per cent of the earth’s true shape; roads are longer',
+  });
+};

@@ -1,6 +1,6 @@
+import { bandOf, evaporationBySurface } from '../engineering/evaporation.ts';
 import { liftShares, mostWithValveLiftingPa, napierKgPerH } from '../engineering/safety-valve.ts';
 import { atmospherePa } from '../engineering/steam.ts';
-import type { BoilerFacts } from '../boilers/boiler.ts';
 import { accumulation } from './checks-steam.ts';
 import { check, figure } from './check.ts';
 import { figureOf, valuesOf } from './examined.ts';
@@ -10,20 +10,15 @@ import { rateText } from './words.ts';
 
 const openShare: Readonly<Record<string, number>> = liftShares;
 
-/** Steam made for each square metre of heating surface, kg/h, low and high; common practice and from memory. */
-const ratesByFiring: Partial<Record<BoilerFacts['firing'], readonly [low: number, high: number]>> = {
-  spirit: [11, 15],
-  gas: [15, 30],
-  coal: [23, 46],
-};
-
-function evaporationOf({ facts, record }: SurveyInput): { low: number; high: number; how: string } | null {
+/** Steam made, kg/h: measured where a feed was timed, else estimated; null where neither can be. */
+export function evaporationOf({
+  facts,
+  record,
+}: Pick<SurveyInput, 'facts' | 'record'>): { low: number; high: number; how: string } | null {
   const measured = record.steam?.evaporationKgPerH ?? null;
   if (measured !== null) return { low: measured, high: measured, how: 'measured' };
-  const rates = ratesByFiring[facts.firing];
-  const surface = facts.dimensions.heatingSurfaceM2;
-  if (rates === undefined || surface === null) return null;
-  return { low: rates[0] * surface, high: rates[1] * surface, how: 'estimated from the heating surface' };
+  const estimated = evaporationBySurface(facts.firing, facts.dimensions.heatingSurfaceM2);
+  return 'refused' in estimated ? null : { ...bandOf(estimated), how: 'estimated from the heating surface' };
 }
 
 const tenths = (kgPerH: number): number => Math.round(kgPerH * 10) / 10;

@@ -1,4 +1,5 @@
 import { gaugeWindowPa, wantedTestPa } from '../engineering/hydraulic-test.ts';
+import { multipleOf, testProfileOf } from '../engineering/test-profiles.ts';
 import type { BoilerFacts } from '../boilers/boiler.ts';
 import { check, figure, isAbove } from './check.ts';
 import type { SurveyInput } from './examined.ts';
@@ -52,13 +53,14 @@ const structural = ({ leaks }: HydraulicTest): HydraulicTest['leaks'] =>
 const wetGlands = ({ leaks }: HydraulicTest): HydraulicTest['leaks'] =>
   leaks.filter(({ place, leakClass, cured }) => place === 'gland' && leakClass > 0 && !cured);
 
-/** Working pressure times the multiple its kind of test asks for. */
+/** Working pressure times the multiple that the profile picked asks for. */
 export const askedPa = (facts: BoilerFacts, test: HydraulicTest): number =>
-  wantedTestPa(facts.workingPressurePa, test.firstTest ? 'first' : 'repeat');
+  wantedTestPa(facts.workingPressurePa, multipleOf(testProfileOf(test.profileId), test.firstTest));
 
 function whyNotValid(facts: BoilerFacts, record: SurveyRecord, test: HydraulicTest): string | null {
   const asked = askedPa(facts, test);
   const hold = holdOf(test);
+  const { holdMinutes } = testProfileOf(test.profileId);
   if (isAbove(asked, test.wantedPa))
     return `The test was for ${pressureText(test.wantedPa)}; ${pressureText(asked)} is asked for.`;
   if (hold === null) return 'The hold was not marked and read at both ends.';
@@ -66,8 +68,8 @@ function whyNotValid(facts: BoilerFacts, record: SurveyRecord, test: HydraulicTe
     return `The hold began at ${pressureText(hold.startPa)}, under the ${pressureText(test.wantedPa)} wanted.`;
   if (isAbove(hold.highestPa, (test.wantedPa * (100 + limits.testOverPercent)) / 100))
     return `It was taken to ${pressureText(hold.highestPa)}, beyond the ${pressureText(test.wantedPa)} wanted.`;
-  if (hold.minutes < limits.holdMinutes)
-    return `It was held for ${trim(hold.minutes, 1)} minutes; ${String(limits.holdMinutes)} are asked for.`;
+  if (hold.minutes < holdMinutes)
+    return `It was held for ${trim(hold.minutes, 1)} minutes; ${String(holdMinutes)} are asked for.`;
   const glands = wetGlands(test).filter(({ leakClass }) => leakClass > limits.glandLeakClass);
   if (glands.length > 0) return `A gland was not cured (${leakText(glands)}); make it dry and try again.`;
   if (!test.filledAndVented) return 'It is not recorded that the boiler was filled and all air let out.';
@@ -104,7 +106,8 @@ export function hydraulicTestCheck({ facts, record }: SurveyInput): EngineeringC
       figures,
     );
   const isFallen =
-    hold !== null && isAbove(hold.startPa - hold.endPa, (hold.startPa * limits.holdFallPercent) / 100);
+    hold !== null &&
+    isAbove(hold.startPa - hold.endPa, (hold.startPa * testProfileOf(test.profileId).fallPercent) / 100);
   if (isFallen && wetGlands(test).length === 0)
     return make.fail(
       `The hydraulic test failed: pressure fell from ${pressureText(hold.startPa)} to ${pressureText(hold.endPa)} and no gland accounts for it.`,

@@ -7,13 +7,23 @@ import { rubric, stopKinds, consequences } from './rubric/types.ts';
 import type { Criterion, Rubric } from './rubric/types.ts';
 import { verdictRule, verdictRules } from './verdict-rules.ts';
 import { verdictId, verdicts } from './verdicts.ts';
+import { inSentence, listText } from './words.ts';
 
 const idAndLabel = z.strictObject({ id: z.string(), label: z.string() });
 
 /** One thing that differs between two versions of the method. */
 export const difference = z.strictObject({
   criterionId: z.string(),
-  what: z.enum(['added', 'removed', 'weight', 'safety-critical', 'applies-to', 'ways', 'defects']),
+  what: z.enum([
+    'added',
+    'removed',
+    'weight',
+    'safety-critical',
+    'applies-to',
+    'ways',
+    'measurements',
+    'defects',
+  ]),
   text: z.string(),
 });
 export type Difference = z.infer<typeof difference>;
@@ -64,6 +74,12 @@ function changesOf(before: Criterion, after: Criterion): Difference[] {
     note('safety-critical', after.safetyCritical ? 'now safety-critical.' : 'no longer safety-critical.');
   if (!same(before.appliesTo, after.appliesTo)) note('applies-to', 'applies to other boilers than before.');
   if (!same(before.ways, after.ways)) note('ways', 'ways of examining or their strengths changed.');
+  const measured = new Set(before.measurements.map(({ quantity }) => quantity));
+  const more = after.measurements.filter(({ quantity }) => !measured.has(quantity));
+  if (more.length > 0)
+    note('measurements', `also measures ${listText(more.map(({ label }) => inSentence(label)))}.`);
+  else if (!same(before.measurements, after.measurements))
+    note('measurements', 'what is measured, or its limits, changed.');
   if (!same(before.defects, after.defects)) note('defects', 'the defect catalogue changed.');
   return changed;
 }

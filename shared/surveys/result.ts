@@ -6,7 +6,7 @@ import { verdictId } from './verdicts.ts';
 export const figure = z.strictObject({
   label: z.string(),
   value: z.number(),
-  unit: z.enum(['Pa', 'mm', 'ppm', 'kg/h', 'min', 'count', '%', 'bar·L', 'kW', 'day']),
+  unit: z.enum(['Pa', 'mm', 'ppm', 'kg/h', 'min', 'count', '%', 'bar·L', 'kW', 'L', 'day']),
 });
 export type Figure = z.infer<typeof figure>;
 

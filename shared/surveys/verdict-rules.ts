@@ -152,7 +152,8 @@ export const verdictRules = [
 export type RuleId = (typeof verdictRules)[number]['id'];
 
 /** The engineering checks that a rule listens to. */
-export type CheckId = (typeof verdictRules)[number]['checks'][number] | 'bar-litres';
+export type CheckId =
+  (typeof verdictRules)[number]['checks'][number] | 'bar-litres' | 'water-reserve' | 'gas-heat';
 
 /** The rule that a defect marked as a stop fires. */
 export const ruleOfStop: Record<StopKind, RuleId> = {

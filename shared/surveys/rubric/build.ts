@@ -82,6 +82,8 @@ export const lengthMm = (quantity: string, label: string, min: number, max: numb
   measure(quantity, label, 'mm', [min, max]);
 export const pressurePa = (quantity: string, label: string, max = 6_000_000, min = 0): MeasurementSpec =>
   measure(quantity, label, 'Pa', [min, max]);
+export const litres = (quantity: string, label: string, max: number): MeasurementSpec =>
+  measure(quantity, label, 'L', [0, max]);
 export const count = (quantity: string, label: string, max: number): MeasurementSpec =>
   measure(quantity, label, 'count', [0, max]);
 export const rate = (

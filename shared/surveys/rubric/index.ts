@@ -7,13 +7,29 @@ import { firing } from './firing.ts';
 import { identity } from './identity.ts';
 import { safety } from './safety.ts';
 import { shell } from './shell.ts';
-import type { AppliesTo, Criterion, DefectSpec, Rubric } from './types.ts';
+import { addedIn110 } from './measured-more.ts';
+import type { AppliesTo, Criterion, DefectSpec, MeasurementSpec, Rubric, Section } from './types.ts';
 
 /** What decides which criteria apply: type, fittings and firing, and nothing else the seller says. */
 export type ApplicableFacts = Pick<BoilerFacts, 'type' | 'fittings' | 'firing'>;
 
 /** The version a new survey is scored with. */
-export const rubricVersion = '1.0.0';
+export const rubricVersion = '1.1.0';
+
+/** Sections with more to measure under some criteria. */
+const measuringMore = (
+  sections: readonly Section[],
+  added: Readonly<Record<string, readonly MeasurementSpec[]>>,
+): Section[] =>
+  sections.map((part) => ({
+    ...part,
+    criteria: part.criteria.map((criterion) => ({
+      ...criterion,
+      measurements: [...criterion.measurements, ...(added[criterion.id] ?? [])],
+    })),
+  }));
+
+const firstSections: Section[] = [identity, shell, safety, feed, firing, casing];
 
 /** Every version ever published, oldest first. A report keeps the one it was scored with. */
 export const rubricVersions: readonly Rubric[] = [
@@ -21,9 +37,27 @@ export const rubricVersions: readonly Rubric[] = [
     version: '1.0.0',
     publishedOn: '2026-12-01',
     changes: ['First published version.'],
-    sections: [identity, shell, safety, feed, firing, casing],
+    sections: firstSections,
+  },
+  {
+    version: '1.1.0',
+    publishedOn: '2026-12-01',
+    changes: [
+      'Pressure is worked out for every part: barrel, end plates, flue, tubes and stays. Before, it was barrel, flue and stayed plate.',
+      'Metal in the fire is taken 15 °C hotter than the steam, and a seam at what its kind carries. Copper barrels are held to the trade’s older rule as well; the lower governs.',
+      'A part that falls short on the seller’s figures alone is to be measured; it no longer passes unseen behind a measured one.',
+      'Feed is checked against the estimated steam where no feed was timed. Water in hand, and the heat and air of a gas flame, are worked out and shown.',
+      'A hydraulic test is judged by the profile the surveyor picks, and the report says which.',
+    ],
+    sections: measuringMore(firstSections, addedIn110),
   },
 ];
+
+/** Whether a version of the method was published no earlier than another. An unknown version is none. */
+export const isFrom = (version: string, since: string): boolean => {
+  const order = rubricVersions.map((rubric) => rubric.version);
+  return order.indexOf(version) >= order.indexOf(since);
+};
 
 /** @throws Problem `invalid-input` if no such version was published. */
 export function rubricOf(version: string): Rubric {

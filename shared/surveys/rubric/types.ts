@@ -35,6 +35,7 @@ export const measureUnits = {
   mm: 'length',
   ppm: 'parts per million',
   'kg/h': 'water or steam in an hour',
+  L: 'litres',
   count: 'a whole number',
   text: 'words',
   'yes-no': 'yes or no',

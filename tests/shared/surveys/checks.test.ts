@@ -1,16 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { scoreSurvey } from '#shared/surveys/score.ts';
 import type { SurveyInput } from '#shared/surveys/examined.ts';
-import {
-  allowableStressPa,
-  barrelPressurePa,
-  fluePressurePa,
-  stayedPlatePressurePa,
-} from '#shared/engineering/strength.ts';
 import { goodFacts, goodSteam, goodSurvey, withFinding } from './example.ts';
 
 const bar = 100_000;
-const psi = 6_894.757_293;
 const checkOf = (id: string, survey: SurveyInput) =>
   scoreSurvey(survey).checks.find((each) => each.id === id);
 const statusOf = (id: string, survey: SurveyInput) => checkOf(id, survey)?.status;
@@ -27,23 +20,6 @@ const unproved = (survey: SurveyInput): SurveyInput => ({
 });
 
 describe('strength of the parts', () => {
-  it('takes copper’s stress from the published table, falling as it gets hotter', () => {
-    // Copper Development Association tube handbook: 4700 psi at 300 °F, which is steam at 3.61 bar gauge.
-    expect(Math.abs((allowableStressPa('copper', 361_000) ?? 0) / (4_700 * psi) - 1)).toBeLessThan(0.001);
-    const stresses = [1, 3, 6, 9, 12, 16].map((bars) => allowableStressPa('copper', bars * bar) ?? 0);
-    expect(stresses).toEqual(stresses.toSorted((a, b) => b - a));
-    expect(allowableStressPa('copper', 17 * bar)).toBeNull();
-    expect(allowableStressPa('brass', bar)).toBeNull();
-  });
-
-  it('works a barrel, a flue and a stayed plate as the formulas say', () => {
-    // By hand, 30 MPa: 0.8·30e6·2/(49 + 1.2) = 956,175; 2·30e6·1.5/40 = 2.25e6; 3²·30e6·2.1/30² = 630,000.
-    expect(barrelPressurePa({ outsideMm: 102, thicknessMm: 2, stressPa: 30e6 })).toBeCloseTo(956_175.3, 0);
-    const flue = { insideMm: 37, thicknessMm: 1.5, stressPa: 30e6, material: 'copper' as const };
-    expect(fluePressurePa(flue)).toBeCloseTo(2_250_000, 3);
-    expect(stayedPlatePressurePa({ pitchMm: 30, thicknessMm: 3, stressPa: 30e6 })).toBeCloseTo(630_000, 3);
-  });
-
   it('fails on a measured wall only; on the seller’s figure it cannot say', () => {
     const thin = (value: number) =>
       withFinding('shell.barrel', { measurements: [{ quantity: 'thinnestMm', value }] });
@@ -51,6 +27,93 @@ describe('strength of the parts', () => {
     expect(statusOf('parts-pressure', thin(0.5))).toBe('fail');
     const said = goodSurvey({}, { dimensions: { ...goodFacts.dimensions, barrelThicknessMm: 0.5 } });
     expect(statusOf('parts-pressure', said)).toBe('cannot-say');
+  });
+
+  it('does not let a stout barrel hide a part that falls short on the seller’s figures', () => {
+    const measured = [{ quantity: 'thinnestMm', value: 3 }];
+    const dimensions = { ...goodFacts.dimensions, endPlateThicknessMm: 0.5 };
+    const survey = withFinding('shell.barrel', { measurements: measured }, { dimensions });
+    const wide = {
+      ...survey,
+      record: {
+        ...survey.record,
+        findings: survey.record.findings.map((finding) =>
+          finding.criterionId === 'shell.plates'
+            ? { ...finding, measurements: [{ quantity: 'supportPitchMm', value: 20 }] }
+            : finding,
+        ),
+      },
+    };
+    const found = checkOf('parts-pressure', wide);
+    expect(found?.status).toBe('cannot-say');
+    expect(found?.text).toContain('End plates at 0.5 mm');
+    expect(found?.text).toContain('Measure it');
+  });
+
+  it('says what each part stands, and what was not worked out', () => {
+    const found = checkOf(
+      'parts-pressure',
+      withFinding('shell.barrel', { measurements: [{ quantity: 'thinnestMm', value: 2 }] }),
+    );
+    expect(found?.figures.map(({ label }) => label)).toEqual([
+      'Barrel, thickness',
+      'Barrel, by calculation',
+      'Tubes, by calculation',
+      'Claimed working pressure',
+    ]);
+    expect(found?.text).toContain('Not worked out: end plates.');
+  });
+});
+
+describe('what version 1.0.0 worked out', () => {
+  it('barrel, flue and stayed plate alone, a seam at 0.8 whatever it is, and no word of water in hand', () => {
+    const good = withFinding('shell.barrel', { measurements: [{ quantity: 'thinnestMm', value: 2 }] });
+    const first = { ...good, record: { ...good.record, rubricVersion: '1.0.0' } };
+    const found = checkOf('parts-pressure', first);
+    // By hand at 4 bar: copper at 305.5 °F, 4,623 psi; 0.8·31.88e6·2/(49 + 1.2) = 1.016e6 Pa.
+    const stands = found?.figures.find(({ label }) => label === 'Barrel stands')?.value ?? 0;
+    expect(Math.abs(stands / 1.016e6 - 1)).toBeLessThan(0.001);
+    expect(checkOf('water-reserve', first)).toBeUndefined();
+    expect(checkOf('water-reserve', good)).toBeDefined();
+  });
+});
+
+describe('running', () => {
+  it('minutes of water in hand by the steam made', () => {
+    // 0.1 L of water at 4 bar is 91.5 g; at 2 kg/h, 2.7 minutes.
+    const found = checkOf(
+      'water-reserve',
+      withFinding('safety.glass', { measurements: [{ quantity: 'waterInGlassL', value: 0.1 }] }),
+    );
+    expect(found?.status).toBe('pass');
+    expect(found?.figures[0]).toMatchObject({ value: 2.7, unit: 'min' });
+  });
+
+  it('heat and air of a gas flame by its jet', () => {
+    const found = checkOf(
+      'gas-heat',
+      withFinding('firing.fuel', {
+        measurements: [
+          { quantity: 'jetMm', value: 0.2 },
+          { quantity: 'fuelPressurePa', value: 150_000 },
+          { quantity: 'gasKind', value: 'butane' },
+        ],
+      }),
+    );
+    // The check table's GS-06: 74.8 g/h of butane, 0.95 kW.
+    expect(found?.figures[0]).toMatchObject({ value: 0.95, unit: 'kW' });
+    expect(found?.text).toContain('75 g of butane an hour');
+  });
+
+  it('holds a test to the profile picked', () => {
+    const good = goodSurvey();
+    const test = { ...good.record.hydraulic!, profileId: 'hobby-long' };
+    const long = goodSurvey({ hydraulic: test });
+    expect(checkOf('hydraulic-test', long)?.text).toContain('It was held for 10 minutes; 30 are asked for.');
+    const law = goodSurvey({ hydraulic: { ...test, profileId: 'pressure-law', wantedPa: 5.8 * bar } });
+    expect(statusOf('hydraulic-test', law)).toBe('pass');
+    const hobby = goodSurvey({ hydraulic: { ...test, profileId: 'hobby', wantedPa: 5.8 * bar } });
+    expect(statusOf('hydraulic-test', hobby)).toBe('cannot-say');
   });
 });
 

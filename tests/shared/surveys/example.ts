@@ -2,7 +2,7 @@ import type { BoilerFacts } from '#shared/boilers/boiler.ts';
 import { emptyRecord } from '#shared/surveys/record.ts';
 import type { Finding, HydraulicTest, SteamTest, SurveyRecord } from '#shared/surveys/record.ts';
 import type { SurveyInput } from '#shared/surveys/examined.ts';
-import { criteriaFor, rubricVersion } from '#shared/surveys/rubric/index.ts';
+import { criteriaFor, rubricVersion, rubricVersions } from '#shared/surveys/rubric/index.ts';
 
 const bar = 100_000;
 
@@ -146,8 +146,13 @@ export function withFinding(
   };
 }
 
-/** Surveys whose results are kept to the byte; a name is the name of its file under `published/`. */
-export const publishedSurveys: [name: string, survey: SurveyInput][] = [
+/** A survey as it would have been scored with a version of the method. */
+const under = (version: string, survey: SurveyInput): SurveyInput => ({
+  ...survey,
+  record: { ...survey.record, rubricVersion: version },
+});
+
+const keptSurveys: readonly (readonly [name: string, survey: SurveyInput])[] = [
   ['nothing-wrong', goodSurvey()],
   [
     'worn-bush',
@@ -159,3 +164,8 @@ export const publishedSurveys: [name: string, survey: SurveyInput][] = [
   ['carbon-monoxide', goodSurvey({ steam: { ...goodSteam, coPpmAtOperator: 120 } })],
   ['cold-by-eye', { ...goodSurvey({ hydraulic: null, steam: null }), scope: 'external' }],
 ];
+
+/** Surveys whose results are kept to the byte, under every version; a name is that of its file under `published/`. */
+export const publishedSurveys: [name: string, survey: SurveyInput][] = rubricVersions.flatMap(({ version }) =>
+  keptSurveys.map(([name, survey]): [string, SurveyInput] => [`${version}/${name}`, under(version, survey)]),
+);

@@ -1,12 +1,6 @@
 import type { Units } from '#shared/accounts/contract.ts';
-import {
-  kgPerPound,
-  kmPerMile,
-  litresPerPint,
-  mmPerInch,
-  paPerBar,
-  paPerPsi,
-} from '#shared/engineering/units.ts';
+import { fromKept, quantityText, toKept, unitOf } from '#shared/engineering/quantities.ts';
+import type { Quantity } from '#shared/engineering/quantities.ts';
 import type { Money } from '#shared/money.ts';
 
 const locale = 'en-GB';
@@ -63,36 +57,27 @@ export function formatFromNow(at: string, now: Date = new Date()): string {
   return words.format(Math.round(minutes / 1_440), 'day');
 }
 
-const factors = {
-  pressure: {
-    imperial: { per: paPerPsi, unit: 'psi', digits: 0 },
-    metric: { per: paPerBar, unit: 'bar', digits: 2 },
-  },
-  length: { imperial: { per: mmPerInch, unit: 'in', digits: 3 }, metric: { per: 1, unit: 'mm', digits: 1 } },
-  volume: {
-    imperial: { per: litresPerPint, unit: 'pints', digits: 2 },
-    metric: { per: 1, unit: 'litres', digits: 2 },
-  },
-  mass: { imperial: { per: kgPerPound, unit: 'lb', digits: 1 }, metric: { per: 1, unit: 'kg', digits: 1 } },
-  distance: {
-    imperial: { per: kmPerMile, unit: 'miles', digits: 0 },
-    metric: { per: 1, unit: 'km', digits: 0 },
-  },
-} as const;
-/** pressure in Pa, length in mm, volume in litres, mass in kg, distance in km. */
-export type Quantity = keyof typeof factors;
+export type { Quantity };
+export { unitOf };
+export const fromSi = fromKept;
+export const toSi = toKept;
 
-export const unitOf = (quantity: Quantity, units: Units): string => factors[quantity][units].unit;
-export const fromSi = (quantity: Quantity, units: Units, value: number): number =>
-  value / factors[quantity][units].per;
-export const toSi = (quantity: Quantity, units: Units, value: number): number =>
-  value * factors[quantity][units].per;
+/** Places after the point where a list of figures wants them alike; the rest go by significant figures. */
+const places: Partial<Record<Quantity, Record<Units, number>>> = {
+  pressure: { imperial: 0, metric: 2 },
+  length: { imperial: 3, metric: 1 },
+  volume: { imperial: 2, metric: 2 },
+  mass: { imperial: 1, metric: 1 },
+  distance: { imperial: 0, metric: 0 },
+};
 
 /** A figure in the reader's units with its unit; a dash for none. */
 export function formatQuantity(quantity: Quantity, units: Units, value: number | null | undefined): string {
   if (value === null || value === undefined || !Number.isFinite(value)) return '–';
-  const { digits, unit } = factors[quantity][units];
-  return `${formatNumber(fromSi(quantity, units, value), digits)} ${unit}`;
+  const digits = places[quantity]?.[units];
+  return digits === undefined
+    ? quantityText(quantity, units, value)
+    : `${formatNumber(fromKept(quantity, units, value), digits)} ${unitOf(quantity, units)}`;
 }
 
 export const formatBytes = (bytes: number): string =>

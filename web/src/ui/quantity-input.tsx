@@ -16,8 +16,6 @@ interface Props {
   isOptional?: boolean;
 }
 
-const places: Record<Quantity, number> = { pressure: 2, length: 4, volume: 3, mass: 2, distance: 1 };
-
 /** Decimal, or a fraction of an inch as the trade writes it: 3/32, 1 1/4. */
 export function readNumber(text: string): number | null {
   const [, whole = '0', top, bottom] = /^(?:(\d+)\s+)?(\d+)\s*\/\s*(\d+)$/.exec(text.trim()) ?? [];
@@ -28,7 +26,7 @@ export function readNumber(text: string): number | null {
 }
 
 const shown = (quantity: Quantity, units: Units, value: number | null): string =>
-  value === null ? '' : String(Number(fromSi(quantity, units, value).toFixed(places[quantity])));
+  value === null ? '' : String(Number(fromSi(quantity, units, value).toPrecision(6)));
 
 /** A figure in the person's own units, kept in SI. What was typed stays as typed, even when it is not a figure. */
 export function QuantityInput({ label, quantity, value, onChange, hint, error, isOptional = false }: Props) {
@@ -54,7 +52,7 @@ export function QuantityInput({ label, quantity, value, onChange, hint, error, i
             onChange={(event) => {
               const next = event.target.value;
               const read = readNumber(next);
-              const si = read === null ? null : Number(toSi(quantity, units, read).toFixed(6));
+              const si = read === null ? null : toSi(quantity, units, read);
               setTyped({ text: next, value: si, units });
               onChange(si);
             }}

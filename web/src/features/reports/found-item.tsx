@@ -108,6 +108,7 @@ function Measured({
       case 'mm':
       case 'ppm':
       case 'kg/h':
+      case 'L':
       case 'count':
         return show({ value, unit: spec.unit });
       default:

@@ -1,3 +1,4 @@
+import { testProfileOf } from '#shared/engineering/test-profiles.ts';
 import type { Report } from '#shared/surveys/contract.ts';
 import { leakClasses, leakPlaces } from '#shared/surveys/record.ts';
 import type { HydraulicTest, SteamTest } from '#shared/surveys/record.ts';
@@ -54,6 +55,7 @@ function HydraulicFigures({ test }: { test: HydraulicTest }) {
     <KeyFigures
       items={[
         { label: 'Kind', value: test.firstTest ? 'First, or after repair' : 'Repeat' },
+        { label: 'Tested to', value: testProfileOf(test.profileId).label },
         { label: 'Pressure wanted', value: show('pressure', test.wantedPa) },
         { label: 'Held', value: from === null || to === null ? '–' : `${String(to - from)} min` },
         { label: 'Leaks', value: test.leaks.length === 0 ? 'None' : test.leaks.length },

@@ -11,6 +11,8 @@ export function useShowFigure(): (figure: Pick<Figure, 'value' | 'unit'>) => str
         return show('pressure', value);
       case 'mm':
         return show('length', value);
+      case 'L':
+        return show('volume', value);
       case 'count':
         return formatNumber(value);
       case '%':

@@ -1,6 +1,7 @@
 import type { BoilerFacts } from '#shared/boilers/boiler.ts';
+import { testProfileIds, testProfileOf, testProfiles } from '#shared/engineering/test-profiles.ts';
+import type { TestProfileId } from '#shared/engineering/test-profiles.ts';
 import { askedPa, hydraulicTestCheck } from '#shared/surveys/checks-hydraulic.ts';
-import { limits } from '#shared/surveys/limits.ts';
 import type { HydraulicTest, SurveyRecord } from '#shared/surveys/record.ts';
 import type { ScopeId } from '#shared/surveys/scopes.ts';
 import { useUnits } from '#web/lib/units.tsx';
@@ -8,6 +9,7 @@ import { Button } from '#web/ui/button.tsx';
 import { Check, Choices } from '#web/ui/check.tsx';
 import { Field, FieldGroup } from '#web/ui/field.tsx';
 import { Caution, Notice } from '#web/ui/notes.tsx';
+import { Select } from '#web/ui/select.tsx';
 import { FigureInput } from './figure-input.tsx';
 import { LeakFields } from './leak-fields.tsx';
 import { ReadingsTable } from './readings-table.tsx';
@@ -66,6 +68,11 @@ export function HydraulicScreen({ facts, scope, record, edit }: Props) {
   );
 }
 
+const profileLabels = Object.fromEntries(testProfileIds.map((id) => [id, testProfiles[id].label])) as Record<
+  TestProfileId,
+  string
+>;
+
 interface TestProps extends Omit<Props, 'edit'> {
   test: HydraulicTest;
   onChange: (change: Partial<HydraulicTest>) => void;
@@ -76,12 +83,21 @@ function TestFields({ facts, scope, record, test, onChange, onRemove }: TestProp
   const { show } = useUnits();
   const { status, text } = hydraulicTestCheck({ facts, record, scope });
   const kind = { pass: 'good', fail: 'bad', 'cannot-say': 'plain' } as const;
-  const setKind = (firstTest: boolean) => {
-    const wantedPa = askedPa(facts, { ...test, firstTest });
-    onChange({ firstTest, profileId: firstTest ? 'first' : 'repeat', wantedPa });
+  const profile = testProfileOf(test.profileId);
+  const setKind = (kindOfTest: Partial<Pick<HydraulicTest, 'firstTest' | 'profileId'>>) => {
+    onChange({ ...kindOfTest, wantedPa: askedPa(facts, { ...test, ...kindOfTest }) });
   };
   return (
     <>
+      <Select
+        label="Tested to"
+        value={testProfileIds.find((id) => id === test.profileId) ?? 'hobby'}
+        options={profileLabels}
+        hint={`Hold ${String(profile.holdMinutes)} minutes, fall at most ${String(profile.fallPercent)} %. ${profile.source}. Your local code governs; the report says which you picked.`}
+        onChange={(profileId) => {
+          if (profileId !== null) setKind({ profileId });
+        }}
+      />
       <FieldGroup legend="Which test">
         <Choices
           name="which-test"
@@ -90,16 +106,16 @@ function TestFields({ facts, scope, record, test, onChange, onRemove }: TestProp
             {
               id: 'repeat',
               label: 'Repeat test',
-              hint: `${String(limits.repeatTestPercent / 100)} times working pressure`,
+              hint: `${String(profile.repeatPercent / 100)} times working pressure`,
             },
             {
               id: 'first',
               label: 'First test, or after a repair to the shell',
-              hint: `${String(limits.firstTestPercent / 100)} times working pressure`,
+              hint: `${String(profile.firstPercent / 100)} times working pressure`,
             },
           ]}
           onChange={(id) => {
-            setKind(id === 'first');
+            setKind({ firstTest: id === 'first' });
           }}
         />
       </FieldGroup>
@@ -152,7 +168,7 @@ function TestFields({ facts, scope, record, test, onChange, onRemove }: TestProp
       />
       <FieldGroup
         legend="The hold"
-        hint={`At least ${String(limits.holdMinutes)} minutes, read at both ends`}
+        hint={`At least ${String(profile.holdMinutes)} minutes, read at both ends`}
       >
         <div className="grid grid-cols-2 gap-3">
           <MinuteChoice

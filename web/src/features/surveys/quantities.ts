@@ -10,7 +10,7 @@ export interface Quantity {
   factor: number;
 }
 
-const of = (quantity: 'pressure' | 'length', units: Units, places: number): Quantity => ({
+const of = (quantity: 'pressure' | 'length' | 'volume', units: Units, places: number): Quantity => ({
   unit: unitOf(quantity, units),
   places,
   factor: toSi(quantity, units, 1),
@@ -33,6 +33,8 @@ export function quantityOf(unit: MeasureUnit | 'min', units: Units): Quantity | 
       return { unit, places: 1, factor: 1 };
     case 'min':
       return { unit: 'min', places: 1, factor: 1 };
+    case 'L':
+      return of('volume', units, 3);
     case 'count':
       return { unit: '', places: 0, factor: 1 };
     case 'text':

@@ -109,7 +109,7 @@ export const removePhoto = (criterionId: string, photoId: string): Edit =>
   }));
 
 export const emptyHydraulic = (wantedPa: number): HydraulicTest => ({
-  profileId: 'repeat',
+  profileId: 'hobby',
   firstTest: false,
   wantedPa,
   gaugeRemoved: false,
