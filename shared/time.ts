@@ -39,3 +39,24 @@ export function monthsLater(from: Day, months: number): Day {
   ).getUTCDate();
   return toIso(globalThis.Date.UTC(Math.floor(index / 12), index % 12, Math.min(date, last))).slice(0, 10);
 }
+
+const monthNames = [
+  'January',
+  'February',
+  'March',
+  'April',
+  'May',
+  'June',
+  'July',
+  'August',
+  'September',
+  'October',
+  'November',
+  'December',
+] as const;
+
+/** “12 March 2027”. */
+export function dayText(of: Day): string {
+  const [year = 0, month = 1, date = 1] = of.split('-').map(Number);
+  return `${String(date)} ${monthNames[month - 1] ?? ''} ${String(year)}`;
+}

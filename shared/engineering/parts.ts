@@ -100,14 +100,12 @@ function metalAt(input: PartsInput, isInFire: boolean): Metal | Refusal {
   return isRefusal(stress) ? stress : { lines: [temperature, stress], stressPa: stress.result.value };
 }
 
-const isRefused = <T extends object>(of: T | Refusal): of is Refusal => 'refused' in of;
-
 /** Copper barrels are held to the trade’s older rule as well; the lower governs. */
 function barrelOf(input: PartsInput): PartOutcome {
   const { outsideMm, wallMm, seam, isInFire } = input.barrel;
   if (wallMm === null) return refused('barrel', measureIt('Measure the wall of the barrel.'));
   const metal = metalAt(input, isInFire);
-  if (isRefused(metal)) return refused('barrel', metal);
+  if (isRefusal(metal)) return refused('barrel', metal);
   const byStress = barrelPressure({
     insideRadiusMm: outsideMm / 2 - wallMm,
     thicknessMm: wallMm,
@@ -126,7 +124,7 @@ function platesOf(input: PartsInput, plates: NonNullable<PartsInput['plates']>):
     return refused('plates', notPublished('No allowable stress for brass end plates is published here.'));
   if (thicknessMm === null) return refused('plates', measureIt('Measure the thickness of the end plates.'));
   const metal = metalAt(input, true);
-  if (isRefused(metal)) return refused('plates', metal);
+  if (isRefusal(metal)) return refused('plates', metal);
   const { stressPa } = metal;
   const answer = (() => {
     if (support.by === 'nothing')
@@ -156,7 +154,7 @@ function fluedPart(
   of: { outsideMm: number; wallMm: number; lengthMm: number | null },
 ): PartOutcome {
   const metal = metalAt(input, true);
-  if (isRefused(metal)) return refused(id, metal);
+  if (isRefusal(metal)) return refused(id, metal);
   const flue = fluePressure({
     outsideMm: of.outsideMm,
     thicknessMm: of.wallMm,
@@ -164,7 +162,7 @@ function fluedPart(
     stressPa: metal.stressPa,
     ...elasticity[input.material],
   });
-  if (isRefused(flue)) return refused(id, flue, metal.lines);
+  if (isRefusal(flue)) return refused(id, flue, metal.lines);
   return {
     id,
     title: partTitles[id],
@@ -188,7 +186,7 @@ function tubesOf(input: PartsInput, tubes: NonNullable<PartsInput['tubes']>): Pa
     return refused('tubes', measureIt('Measure the diameter and the wall of a tube.'));
   if (pressure === 'outside') return fluedPart('tubes', input, { outsideMm, wallMm, lengthMm });
   const metal = metalAt(input, true);
-  if (isRefused(metal)) return refused('tubes', metal);
+  if (isRefusal(metal)) return refused('tubes', metal);
   const answer = tubePressure({ outsideMm, thicknessMm: wallMm, stressPa: metal.stressPa });
   return isRefusal(answer) ? refused('tubes', answer, metal.lines) : stands('tubes', metal.lines, [answer]);
 }
@@ -198,7 +196,7 @@ function staysOf(input: PartsInput, stays: NonNullable<PartsInput['stays']>): Pa
   if (diameterMm === null || pitchMm === null)
     return refused('stays', measureIt('Measure the diameter of a stay and the widest pitch between stays.'));
   const metal = metalAt(input, true);
-  if (isRefused(metal)) return refused('stays', metal);
+  if (isRefusal(metal)) return refused('stays', metal);
   const outcome = stayPressure({
     pitchMm,
     diameterMm,
@@ -206,7 +204,7 @@ function staysOf(input: PartsInput, stays: NonNullable<PartsInput['stays']>): Pa
     stressPa: metal.stressPa,
     isCopper: input.material === 'copper' || input.material === 'copper-brass',
   });
-  if (isRefused(outcome)) return refused('stays', outcome, metal.lines);
+  if (isRefusal(outcome)) return refused('stays', outcome, metal.lines);
   return {
     id: 'stays',
     title: partTitles.stays,

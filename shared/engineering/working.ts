@@ -32,8 +32,7 @@ export interface Refusal {
 
 export type Answer = Line | Refusal;
 
-export const isRefusal = (answer: Answer): answer is Refusal => 'refused' in answer;
-export const isLine = (answer: Answer): answer is Line => !isRefusal(answer);
+export const isRefusal = <T extends object>(of: T | Refusal): of is Refusal => 'refused' in of;
 
 export const outOfRange = (text: string): Refusal => ({ refused: 'out-of-range', text });
 export const notPublished = (text: string): Refusal => ({ refused: 'not-published', text });
