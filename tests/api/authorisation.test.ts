@@ -7,6 +7,7 @@ import { emptyRecord } from '#shared/surveys/record.ts';
 import { rubricVersion } from '#shared/surveys/rubric/index.ts';
 import { scoreSurvey } from '#shared/surveys/score.ts';
 import { addDays, addHours, dayOf } from '#shared/time.ts';
+import { workings } from '#shared/workings/contract.ts';
 import { file, givenExamination, givenRecorded } from '#tests/support/examinations.ts';
 import { completeDraft, givenListing, tinyPicture } from '#tests/support/factories.ts';
 import {
@@ -141,8 +142,10 @@ const order = (
 ): Call => of(trade, method, `/api/survey-orders/${trade.orderId}${rest}`, body);
 const reason = { reason: 'For this test' };
 
+type Row = [call: (made: World, site: Site) => Call, columns: Columns];
+
 /** Every route, how it is called, and what each asker gets. A route that is missing here fails the test. */
-const table: Record<string, [(made: World, site: Site) => Call, Columns]> = {
+const table: Record<string, Row> = {
   getMe: [({ placed }) => of(placed, 'get', '/api/me'), everyone],
   updateMe: [({ placed }) => of(placed, 'patch', '/api/me', {}), members],
   skipEnrolment: [({ placed }) => of(placed, 'post', '/api/me/skip-enrolment', {}), members],
@@ -236,6 +239,13 @@ const table: Record<string, [(made: World, site: Site) => Call, Columns]> = {
   checkReport: [({ reviewed, filed }) => of(reviewed, 'get', `/api/checks/${filed.checkCode}`), everyone],
   getMethod: [({ placed }) => of(placed, 'get', '/api/method'), everyone],
   scoreBySurveyMethod: [({ placed }) => of(placed, 'post', '/api/method/score', score()), everyone],
+  listWorkings: [({ placed }) => of(placed, 'get', '/api/workings'), everyone],
+  ...Object.fromEntries(
+    workings.map(({ calculator, endpoint }): [string, Row] => [
+      endpoint.name,
+      [({ placed }) => of(placed, 'post', endpoint.path, { inputs: calculator.initial }), everyone],
+    ]),
+  ),
   getMySurveyorTerms: [({ placed }) => of(placed, 'get', '/api/my/surveyor-terms'), surveyorsOnly],
   saveMySurveyorTerms: [
     ({ placed }, site) =>
