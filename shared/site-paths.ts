@@ -5,6 +5,8 @@ export const sitePaths = {
   sellStart: '/sell',
   surveys: '/surveys',
   method: '/method',
+  workings: '/workings',
+  working: (id: string, inputs = ''): string => `/workings/${id}${inputs && `?${inputs}`}`,
   check: '/check',
   checkCode: (code: string): string => `/check/${code}`,
   commission: (slug: string): string => `/boilers/${slug}/survey`,

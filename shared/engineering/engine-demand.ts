@@ -67,22 +67,23 @@ export interface EngineMatch {
   speed: BandLines;
 }
 
+const ratioLine = (word: string, symbol: string, made: number, taken: number): Line =>
+  work({
+    result: [symbol, `Made over taken, at ${word}`, 'ratio'],
+    formula: '{W} / {D}',
+    terms: {
+      W: ['Steam made', 'massRate', made],
+      D: ['Steam taken', 'massRate', taken],
+    },
+    compute: ({ W, D }) => W / D,
+    source: 'engine-demand',
+    holds: 'Steady running; water in hand carries a short spell',
+  });
+
 /** Steam made against steam taken. */
 export function matchEngine(engine: EngineFacts, steamKgPerH: Band, demand: Band): EngineMatch {
-  const ratio = (word: string, symbol: string, made: number, taken: number): Line =>
-    work({
-      result: [symbol, `Made over taken, at ${word}`, 'ratio'],
-      formula: '{W} / {D}',
-      terms: {
-        W: ['Steam made', 'massRate', made],
-        D: ['Steam taken', 'massRate', taken],
-      },
-      compute: ({ W, D }) => W / D,
-      source: 'engine-demand',
-      holds: 'Steady running; water in hand carries a short spell',
-    });
-  const low = ratio('worst', 'm_low', steamKgPerH.low, demand.high);
-  const high = ratio('best', 'm_high', steamKgPerH.high, demand.low);
+  const low = ratioLine('worst', 'm_low', steamKgPerH.low, demand.high);
+  const high = ratioLine('best', 'm_high', steamKgPerH.high, demand.low);
   const speed = (word: string, symbol: string, { result }: Line): Line =>
     work({
       result: [symbol, `Fastest it could keep, at ${word}`, 'speed'],

@@ -32,7 +32,7 @@ export interface Refusal {
 
 export type Answer = Line | Refusal;
 
-export const isRefusal = <T extends object>(of: T | Refusal): of is Refusal => 'refused' in of;
+export const isRefusal = (of: object): of is Refusal => 'refused' in of;
 
 export const outOfRange = (text: string): Refusal => ({ refused: 'out-of-range', text });
 export const notPublished = (text: string): Refusal => ({ refused: 'not-published', text });

@@ -119,9 +119,7 @@ export const choice = <const O extends Readonly<Record<string, string>>>(
 ): Field<keyof O & string> => ({
   label,
   control: { kind: 'choice', options },
-  schema: z
-    .enum(Object.keys(options), `Choose one: ${label.toLowerCase()}`)
-    .meta({ description: label }) as unknown as z.ZodType<keyof O & string>,
+  schema: z.enum(Object.keys(options), `Choose one: ${label.toLowerCase()}`).meta({ description: label }),
   initial,
   isOptional: false,
   ...rest(more),

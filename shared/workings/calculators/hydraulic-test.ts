@@ -55,16 +55,15 @@ export const hydraulicTestCalculator = calculator({
     }),
     minutes: unknownFigure('Held for', 'minutes', [0, 600], null, { part: 'A hold you have read' }),
   },
-  check: ({ startPa, endPa }) => [
-    ...(startPa !== null && endPa !== null && endPa > startPa * 1.06
+  check: ({ startPa, endPa }) =>
+    startPa !== null && endPa !== null && endPa > startPa * 1.06
       ? [
           {
             field: 'endPa',
             message: 'Pressure cannot rise over a hold unless the water warmed: wait and read again',
           },
         ]
-      : []),
-  ],
+      : [],
   work: ({ workingPa, profile: id, kind, volumeL, ownGaugePa, testGaugePa, startPa, endPa, minutes }) => {
     const profile = testProfileOf(id);
     const wanted = testPressure(workingPa, multipleOf(profile, kind === 'first'));

@@ -6,6 +6,8 @@ import { trim } from '../../surveys/words.ts';
 import { calculator, curve, resultsOf, spread, steps } from '../calculator.ts';
 import { workingPressure } from '../ranges.ts';
 
+const kelvin = (pa: number): number => saturationTemperatureK(pa + atmospherePa);
+
 /** Steam at a pressure. */
 export const saturatedSteamCalculator = calculator({
   id: 'saturated-steam',
@@ -45,15 +47,12 @@ export const saturatedSteamCalculator = calculator({
       ],
     };
   },
-  plot: ({ pressurePa }) => {
-    const kelvin = (pa: number) => saturationTemperatureK(pa + atmospherePa);
-    return {
-      title: 'Temperature of steam by pressure',
-      x: { label: 'Gauge pressure', quantity: 'pressure' },
-      y: { label: 'Temperature', quantity: 'temperature' },
-      series: [curve('Saturation', spread(0, Math.max(1_000_000, pressurePa * 1.25)), kelvin)],
-      marks: [{ label: 'Here', x: pressurePa, y: kelvin(pressurePa) }],
-      levels: [],
-    };
-  },
+  plot: ({ pressurePa }) => ({
+    title: 'Temperature of steam by pressure',
+    x: { label: 'Gauge pressure', quantity: 'pressure' },
+    y: { label: 'Temperature', quantity: 'temperature' },
+    series: [curve('Saturation', spread(0, Math.max(1_000_000, pressurePa * 1.25)), kelvin)],
+    marks: [{ label: 'Here', x: pressurePa, y: kelvin(pressurePa) }],
+    levels: [],
+  }),
 });

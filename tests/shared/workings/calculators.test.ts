@@ -81,14 +81,12 @@ describe.each(calculators.map((calculator) => [calculator.id, calculator] as con
       fc.assert(
         fc.property(anyInputs(calculator), (inputs) => {
           const read = calculator.schema.safeParse(inputs);
-          if (!read.success) {
-            expect(
-              read.error.issues.every(
-                ({ path, message }) => String(path[0]) in calculator.fields && message !== '',
-              ),
-            ).toBe(true);
-            return;
-          }
+          // What is refused is refused by a field's name and in words; there is nothing to work out.
+          const issues = read.error?.issues ?? [];
+          expect(
+            issues.every(({ path, message }) => String(path[0]) in calculator.fields && message !== ''),
+          ).toBe(true);
+          if (!read.success) return;
           for (const text of textsOf(calculator, read.data)) expect(text).not.toMatch(noNumber);
           for (const { lines } of calculator.work(read.data).steps)
             for (const line of lines) {
@@ -122,8 +120,7 @@ describe.each(calculators.map((calculator) => [calculator.id, calculator] as con
           const read = calculator.schema.safeParse({ ...example, [name]: outside });
           expect(read.success).toBe(false);
           const said = read.error?.issues.find(({ path }) => path[0] === name)?.message ?? '';
-          expect(said).toMatch(/cannot be|Give a figure/);
-          if (said.includes('cannot be')) expect(said).toContain(label);
+          expect(said).toMatch(new RegExp(`^(Give a figure: |${label} (cannot be|is a whole number))`, 'u'));
           expect(said).not.toMatch(noNumber);
         }
       }

@@ -9,6 +9,7 @@ const places = [
   { to: sitePaths.boilers, label: 'Boilers' },
   { to: sitePaths.sellStart, label: 'Sell' },
   { to: sitePaths.surveys, label: 'Surveys' },
+  { to: sitePaths.workings, label: 'Workings' },
   { to: sitePaths.method, label: 'Method' },
 ];
 
