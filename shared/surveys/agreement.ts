@@ -1,7 +1,9 @@
+import { z } from 'zod';
+import { quadraticKappa } from '../engineering/kappa.ts';
 import { compareCodeUnits } from './canonical.ts';
 import { examinedOf, isExamined } from './examined.ts';
 import type { SurveyInput } from './examined.ts';
-import { quadraticKappa } from '../engineering/kappa.ts';
+import { grade as gradeId } from './record.ts';
 import type { Grade } from './record.ts';
 import { criterionOf } from './rubric/index.ts';
 
@@ -9,23 +11,25 @@ const scale: readonly Grade[] = ['sound', 'serviceable', 'attention', 'unfit'];
 
 const numberOf = (id: string): number => criterionOf(id)?.number ?? 0;
 
-export interface Disagreement {
-  criterionId: string;
-  title: string;
-  first: Grade;
-  second: Grade;
+export const disagreement = z.strictObject({
+  criterionId: z.string(),
+  title: z.string(),
+  first: gradeId,
+  second: gradeId,
   /** How many grades apart, 1–3. */
-  steps: number;
-}
+  steps: z.int().min(1).max(3),
+});
+export type Disagreement = z.infer<typeof disagreement>;
 
-export interface Agreement {
+export const agreement = z.strictObject({
   /** Criteria that both surveys graded. */
-  common: number;
+  common: z.int().min(0),
   /** Quadratic weighted kappa, 1 for full agreement; null where it is not defined. */
-  kappa: number | null;
+  kappa: z.number().max(1).nullable(),
   /** Widest apart first, then in the order of examination. */
-  differences: Disagreement[];
-}
+  differences: z.array(disagreement),
+});
+export type Agreement = z.infer<typeof agreement>;
 
 const gradesOf = (survey: Pick<SurveyInput, 'facts' | 'record'>): Map<string, Grade> =>
   new Map(

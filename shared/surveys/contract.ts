@@ -3,10 +3,12 @@ import { boilerFacts } from '../boilers/boiler.ts';
 import { byId, endpoint } from '../endpoint.ts';
 import { photo } from '../listings/pictures.ts';
 import { instant } from '../time.ts';
+import { agreement } from './agreement.ts';
 import { methodDataSchema } from './method.ts';
 import { signOff, surveyRecord } from './record.ts';
 import { surveyResult } from './result.ts';
 import { extraId, scopeId } from './scopes.ts';
+import { verdictId } from './verdicts.ts';
 
 /** A survey being made: what the surveyor works on. `id` is the order's. */
 export const survey = z.object({
@@ -82,6 +84,25 @@ export const getReport = endpoint({
   response: report,
 });
 
+/** Another filed report on the same boiler, and how far it agrees; the first grade of a difference is this report's. */
+export const reportAgreement = z.object({
+  id: z.uuid(),
+  filedAt: instant,
+  surveyor: z.object({ name: z.string() }),
+  verdict: verdictId,
+  agreement,
+});
+export type ReportAgreement = z.infer<typeof reportAgreement>;
+
+export const getReportAgreements = endpoint({
+  name: 'getReportAgreements',
+  summary: 'How far a filed report agrees with every other on the same boiler, newest first',
+  method: 'GET',
+  path: '/api/reports/:id/agreements',
+  params: byId,
+  response: z.object({ items: z.array(reportAgreement) }),
+});
+
 export const checkReport = endpoint({
   name: 'checkReport',
   summary: 'Whether a check code is that of a filed report, unchanged since',
@@ -97,9 +118,11 @@ export const checkReport = endpoint({
 
 export const getMethod = endpoint({
   name: 'getMethod',
-  summary: 'The published method: sections, criteria, weights, defects and verdict rules',
+  summary:
+    'The published method: sections, criteria, weights, defects and verdict rules; the current version unless another is asked for',
   method: 'GET',
   path: '/api/method',
+  query: z.strictObject({ version: z.string().max(20).optional() }),
   response: methodDataSchema,
 });
 

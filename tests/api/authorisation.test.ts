@@ -236,6 +236,10 @@ const table: Record<string, Row> = {
   ],
   acceptReport: [({ reviewed }) => order(reviewed, 'post', '/accept-report', {}), buyerAlone],
   getReport: [({ reviewed, filed }) => of(reviewed, 'get', `/api/reports/${filed.id}`), everyone],
+  getReportAgreements: [
+    ({ reviewed, filed }) => of(reviewed, 'get', `/api/reports/${filed.id}/agreements`),
+    everyone,
+  ],
   checkReport: [({ reviewed, filed }) => of(reviewed, 'get', `/api/checks/${filed.checkCode}`), everyone],
   getMethod: [({ placed }) => of(placed, 'get', '/api/method'), everyone],
   scoreBySurveyMethod: [({ placed }) => of(placed, 'post', '/api/method/score', score()), everyone],

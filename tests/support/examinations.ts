@@ -7,7 +7,7 @@ import * as surveys from '#api/features/surveys/service.ts';
 import type { OwnListing } from '#shared/listings/contract.ts';
 import { quote } from '#shared/survey-orders/pricing.ts';
 import type { Survey } from '#shared/surveys/contract.ts';
-import type { SurveyRecord } from '#shared/surveys/record.ts';
+import type { Finding, SurveyRecord } from '#shared/surveys/record.ts';
 import { scoreSurvey } from '#shared/surveys/score.ts';
 import type { ScopeId } from '#shared/surveys/scopes.ts';
 import { addDays, dayOf } from '#shared/time.ts';
@@ -25,12 +25,20 @@ export interface Examination {
   surveyor: Person;
 }
 
-/** A survey whose examination has just begun: paid for, agreed and opened, without the days that takes. */
-export async function givenExamination(site: Site, scope: ScopeId = 'full'): Promise<Examination> {
-  const seller = await site.givenPerson('Edna Marsh');
+/**
+ * A survey whose examination has just begun: paid for, agreed and opened, without the days that takes.
+ *
+ * @param earlier an examination of the same boiler, for another buyer and by another surveyor.
+ */
+export async function givenExamination(
+  site: Site,
+  scope: ScopeId = 'full',
+  earlier?: Pick<Examination, 'seller' | 'listing'>,
+): Promise<Examination> {
+  const seller = earlier?.seller ?? (await site.givenPerson('Edna Marsh'));
   const buyer = await site.givenPerson('Col Fettiplace');
-  const surveyor = await site.givenPerson('Isobel Tarn', 'surveyor');
-  const listing = await givenListing(site, seller);
+  const surveyor = await site.givenPerson(earlier ? 'Percy Lomas' : 'Isobel Tarn', 'surveyor');
+  const listing = earlier?.listing ?? (await givenListing(site, seller));
   const { db } = site.deps.database;
   const at = site.clock.now();
   const fees = {
@@ -78,8 +86,16 @@ export const saveRecord = (
   record: SurveyRecord,
 ) => site.as(person).put(`/api/survey-orders/${orderId}/survey`).send({ version, record });
 
-/** Everything sound but a sluggish water gauge, with one photograph of it taken on the day. */
-export async function givenRecorded(site: Site, examination: Examination): Promise<Survey> {
+/**
+ * Everything sound but a sluggish water gauge, with one photograph of it taken on the day.
+ *
+ * @param changes what else this surveyor found otherwise, by criterion.
+ */
+export async function givenRecorded(
+  site: Site,
+  examination: Examination,
+  changes: Readonly<Record<string, Partial<Finding>>> = {},
+): Promise<Survey> {
   const { orderId, surveyor } = examination;
   const { id: photoId } = await uploadPhoto(site, surveyor, {
     purpose: 'survey-photo',
@@ -92,6 +108,11 @@ export async function givenRecorded(site: Site, examination: Examination): Promi
   const good = goodRecord(facts);
   const wantedPa = facts.workingPressurePa * 1.5;
   const readings = [0, wantedPa + 5_000, wantedPa + 3_000];
+  const sluggish: Partial<Finding> = {
+    grade: 'attention',
+    defects: [{ code: 'glass-sluggish', where: '18', note: '', remedy: null, allowance: null }],
+    photoIds: [photoId],
+  };
   const record: SurveyRecord = {
     ...good,
     hydraulic: good.hydraulic && {
@@ -99,16 +120,11 @@ export async function givenRecorded(site: Site, examination: Examination): Promi
       wantedPa,
       readings: readings.map((pressurePa, index) => ({ minute: [0, 5, 15][index] ?? 0, pressurePa })),
     },
-    findings: good.findings.map((finding) =>
-      finding.criterionId === 'safety.glass'
-        ? {
-            ...finding,
-            grade: 'attention',
-            defects: [{ code: 'glass-sluggish', where: '18', note: '', remedy: null, allowance: null }],
-            photoIds: [photoId],
-          }
-        : finding,
-    ),
+    findings: good.findings.map((finding) => ({
+      ...finding,
+      ...(finding.criterionId === 'safety.glass' ? sluggish : {}),
+      ...changes[finding.criterionId],
+    })),
   };
   return (await saveRecord(site, surveyor, orderId, version, record).expect(200)).body as Survey;
 }

@@ -8,7 +8,7 @@ import * as service from './service.ts';
 export function methodRoutes(rateFactor: number): Router {
   const router = Router();
 
-  route(router, contract.getMethod, () => service.getMethod());
+  route(router, contract.getMethod, (_ctx, { query }) => service.getMethod(query.version));
 
   router.use(contract.scoreBySurveyMethod.path, perMinute(60 * rateFactor));
   route(router, contract.scoreBySurveyMethod, (_ctx, { body }) => service.scoreBySurvey(body));

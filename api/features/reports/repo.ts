@@ -1,4 +1,4 @@
-import { eq } from 'drizzle-orm';
+import { desc, eq } from 'drizzle-orm';
 import type { OrderStatus } from '#shared/survey-orders/machine.ts';
 import type { ExtraId } from '#shared/surveys/scopes.ts';
 import type { Instant } from '#shared/time.ts';
@@ -85,4 +85,10 @@ export async function findReport(db: Db, id: string): Promise<StoredReport | und
 export async function findReportByCode(db: Db, checkCode: string): Promise<StoredReport | undefined> {
   const [row] = await find(db).where(eq(reports.checkCode, checkCode));
   return row && fromRow(row);
+}
+
+/** Every report filed on a boiler, newest first. */
+export async function listReportsOfListing(db: Db, listingId: string): Promise<StoredReport[]> {
+  const rows = await find(db).where(eq(reports.listingId, listingId)).orderBy(desc(reports.filedAt), reports.id);
+  return rows.map(fromRow);
 }

@@ -7,4 +7,8 @@ export const reportRoutes = Router();
 
 route(reportRoutes, contract.getReport, (ctx, { params }) => service.getReport(ctx, params.id));
 
+route(reportRoutes, contract.getReportAgreements, (ctx, { params }) =>
+  service.getReportAgreements(ctx, params.id),
+);
+
 route(reportRoutes, contract.checkReport, (ctx, { params }) => service.checkReport(ctx, params.code));

@@ -1,7 +1,8 @@
 import { Problem } from '#shared/problem.ts';
 import type { Photo } from '#shared/listings/pictures.ts';
 import { surveyOrderMachine } from '#shared/survey-orders/machine.ts';
-import type { Report } from '#shared/surveys/contract.ts';
+import { agreementOf } from '#shared/surveys/agreement.ts';
+import type { Report, ReportAgreement } from '#shared/surveys/contract.ts';
 import type { Instant } from '#shared/time.ts';
 import type { Ctx } from '../../ctx.ts';
 import * as photos from '../photos/service.ts';
@@ -75,6 +76,23 @@ export async function getReport(ctx: Ctx, id: string): Promise<Report> {
     sellerPhotos: await photos.listPhotosOfListing(ctx, listing.id),
     viewer: viewerOf(ctx, stored),
   };
+}
+
+/** The other reports on the same boiler, each set against this one. @throws Problem not-found. */
+export async function getReportAgreements(ctx: Ctx, id: string): Promise<{ items: ReportAgreement[] }> {
+  const stored = await repo.findReport(ctx.db, id);
+  if (!stored) throw new Problem('not-found');
+  const all = await repo.listReportsOfListing(ctx.db, stored.listing.id);
+  const items = all
+    .filter((other) => other.id !== id)
+    .map((other) => ({
+      id: other.id,
+      filedAt: other.filedAt,
+      surveyor: { name: other.surveyor.name },
+      verdict: other.result.verdict.id,
+      agreement: agreementOf(stored, other),
+    }));
+  return { items };
 }
 
 interface Checked {
