@@ -5,6 +5,7 @@ export const sitePaths = {
   sellStart: '/sell',
   surveys: '/surveys',
   method: '/method',
+  methodVersion: (version: string): string => `/method?version=${version}`,
   workings: '/workings',
   working: (id: string, inputs = ''): string => `/workings/${id}${inputs && `?${inputs}`}`,
   check: '/check',

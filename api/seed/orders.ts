@@ -33,6 +33,8 @@ export interface SeedOrder {
   /** Days after it was placed that the visit is, or was. */
   visitAfterDays: number;
   stage: Stage;
+  /** Which of the written surveys was made; the boiler's own unless told otherwise. */
+  survey?: string;
 }
 
 /** Orders standing at every stage, so that each role has work on its desk. */
@@ -45,6 +47,16 @@ export const seedOrders: SeedOrder[] = [
     placedDaysAgo: 46,
     visitAfterDays: 6,
     stage: 'settled',
+  },
+  {
+    boiler: 'return-flue',
+    buyer: 'odile',
+    surveyor: 'mabel',
+    scope: 'full',
+    placedDaysAgo: 33,
+    visitAfterDays: 8,
+    stage: 'settled',
+    survey: 'return-flue-again',
   },
   {
     boiler: 'maroon-gas',
@@ -175,7 +187,7 @@ const asAt = (world: World, person: PersonKey, at: string): Ctx => ({
 
 async function examine(world: World, order: SeedOrder, orderId: string, visit: string): Promise<void> {
   const ctx = asAt(world, order.surveyor, addHours(visit, order.stage === 'begun' ? 0.4 : 4));
-  const survey = surveys[order.boiler];
+  const survey = surveys[order.survey ?? order.boiler];
   const opened = await examinations.getSurvey(ctx, orderId);
   const taken = new Map<string, string[]>();
   for (const [criterionId, pictures] of Object.entries(survey?.pictures ?? {})) {

@@ -1,6 +1,6 @@
 import type { SeedSurvey } from './findings.ts';
 
-/** What the surveyors found, by boiler. */
+/** What the surveyors found, by boiler; one was surveyed again by somebody else. */
 export const surveys: Record<string, SeedSurvey> = {
   'return-flue': {
     scope: 'full',
@@ -44,6 +44,62 @@ export const surveys: Record<string, SeedSurvey> = {
     steam: { evaporationKgPerH: 2.6, coPpmAtOperator: 4 },
     summary:
       'A boiler that has been looked after, with papers to show it. I would be glad to see it go to somebody who keeps the papers up.',
+  },
+  'return-flue-again': {
+    scope: 'full',
+    findings: {
+      'shell.barrel': { grade: 'sound', measurements: [{ quantity: 'thinnestMm', value: 2.61 }] },
+      'shell.joints': {
+        grade: 'sound',
+        measurements: [{ quantity: 'jointMaterial', value: 'silver-solder' }],
+      },
+      'shell.fireside': { grade: 'serviceable', note: 'Soot, no more than a season’s worth.' },
+      'safety.gauge': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'fullScalePa', value: 1_100_000 },
+          { quantity: 'zeroErrorPa', value: 0 },
+          { quantity: 'midPointErrorPa', value: 5_000 },
+          { quantity: 'workingPointErrorPa', value: 7_000 },
+          { quantity: 'siphonFitted', value: true },
+          { quantity: 'redLine', value: true },
+        ],
+      },
+      'safety.capacity': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'valveBoreMm', value: 6.5 },
+          { quantity: 'valveLift', value: 'high' },
+          { quantity: 'valvesFitted', value: 1 },
+        ],
+      },
+      'safety.glass': { grade: 'sound', measurements: [{ quantity: 'lowestLevelAboveCrownMm', value: 9 }] },
+      'feed.check': {
+        grade: 'serviceable',
+        defects: [{ code: 'check-weep', where: 'cap of the left one', note: 'A bead of water at 90 psi.' }],
+      },
+      'casing.lagging': {
+        grade: 'serviceable',
+        defects: [{ code: 'lagging-bands', note: 'Second band from the front turns by hand.' }],
+      },
+      'casing.mount': {
+        grade: 'attention',
+        defects: [{ code: 'mount-loose', where: 'rear saddle', note: 'Two of its four screws turn.' }],
+      },
+      'casing.finish': { grade: 'serviceable', defects: [{ code: 'finish-tarnished' }] },
+    },
+    pictures: {
+      'casing.mount': [
+        {
+          file: 'b1-marine-boiler-threequarter',
+          alt: 'Boiler on its base, from the side of the loose saddle.',
+        },
+      ],
+    },
+    hydraulic: { firstTest: false, heldPa: 936_000, fellPa: 4_000 },
+    steam: { evaporationKgPerH: 2.5, coPpmAtOperator: 5 },
+    summary:
+      'I found the shell as Ruth Calder did a fortnight before me. The rear saddle wants its screws before the boiler travels.',
   },
   'twelve-tube': {
     scope: 'full',

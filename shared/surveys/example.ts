@@ -3,6 +3,7 @@ import type { SurveyInput } from './examined.ts';
 import { emptyRecord } from './record.ts';
 import type { Finding, HydraulicTest, Instrument, SteamTest } from './record.ts';
 import { criteriaFor, rubricOf, rubricVersion } from './rubric/index.ts';
+import type { Criterion } from './rubric/types.ts';
 
 const bar = 100_000;
 
@@ -153,6 +154,22 @@ const exampleFindings: Readonly<Record<string, Partial<Finding>>> = {
   'casing.finish': worn('finish-tarnished'),
 };
 
+/** One item as found: only what this version of the method measures. */
+function findingOf({ id, ways, measurements }: Criterion): Finding {
+  const found = exampleFindings[id];
+  return {
+    ...soundFinding(
+      id,
+      // No extras were commissioned: nobody looked inside with a borescope.
+      ways.map((way) => way.id).filter((way) => way !== 'borescope'),
+    ),
+    ...found,
+    measurements: (found?.measurements ?? []).filter(({ quantity }) =>
+      measurements.some((spec) => spec.quantity === quantity),
+    ),
+  };
+}
+
 /** The example as it was surveyed, under a version of the method. @throws Problem if it was never published. */
 export const exampleSurvey = (version: string = rubricVersion): SurveyInput => ({
   facts: exampleFacts,
@@ -160,14 +177,7 @@ export const exampleSurvey = (version: string = rubricVersion): SurveyInput => (
   record: {
     ...emptyRecord(version),
     examinedOn: '2026-05-16',
-    findings: criteriaFor(exampleFacts, rubricOf(version)).map(({ id, ways }) => ({
-      ...soundFinding(
-        id,
-        // No extras were commissioned: nobody looked inside with a borescope.
-        ways.map((way) => way.id).filter((way) => way !== 'borescope'),
-      ),
-      ...exampleFindings[id],
-    })),
+    findings: criteriaFor(exampleFacts, rubricOf(version)).map(findingOf),
     instruments: exampleInstruments,
     hydraulic: exampleHydraulic,
     steam: exampleSteam,

@@ -1,5 +1,5 @@
 import { queryOptions } from '@tanstack/react-query';
-import { checkReport, getReport } from '#shared/surveys/contract.ts';
+import { checkReport, getReport, getReportAgreements } from '#shared/surveys/contract.ts';
 import { call } from '#web/lib/api.ts';
 
 export const reportQueries = {
@@ -8,6 +8,11 @@ export const reportQueries = {
     queryOptions({
       queryKey: [...reportQueries.all, 'detail', id] as const,
       queryFn: ({ signal }) => call(getReport, { params: { id } }, { signal }),
+    }),
+  agreements: (id: string) =>
+    queryOptions({
+      queryKey: [...reportQueries.all, 'agreements', id] as const,
+      queryFn: ({ signal }) => call(getReportAgreements, { params: { id } }, { signal }),
     }),
   /** Asked afresh each time: what is wanted is how the report stands now. */
   check: (code: string) =>
