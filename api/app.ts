@@ -12,6 +12,7 @@ import { accountRoutes } from './features/accounts/routes.ts';
 import { examinationRoutes } from './features/examinations/routes.ts';
 import { deskRoutes } from './features/desk/routes.ts';
 import { listingRoutes } from './features/listings/routes.ts';
+import { engineRoutes } from './features/engines/routes.ts';
 import { methodRoutes } from './features/method/routes.ts';
 import { workingsRoutes } from './features/workings/routes.ts';
 import { officeRoutes } from './features/office/routes.ts';
@@ -109,7 +110,7 @@ export function createApp(deps: Deps): Express {
   app.use('/media', attachCtx(deps));
   app.use(accountRoutes(deps.letters), placeRoutes, listingRoutes, photoRoutes(deps.uploadsDir));
   app.use(examinationRoutes, reportRoutes, methodRoutes(deps.rateFactor), workingsRoutes(deps.rateFactor));
-  app.use(surveyorRoutes, surveyOrderRoutes, deskRoutes, officeRoutes);
+  app.use(surveyorRoutes, surveyOrderRoutes, engineRoutes, deskRoutes, officeRoutes);
   app.use(openApiRoute(publicUrl));
   app.use('/api', nothingHere);
 

@@ -3,6 +3,7 @@ import type { Deps } from '../deps.ts';
 import * as accounts from '../features/accounts/service.ts';
 import { handleJob } from '../jobs/handlers.ts';
 import { horizontalBoilers } from './boilers-horizontal.ts';
+import { keepEngines } from './engines.ts';
 import { otherBoilers } from './boilers-other.ts';
 import { verticalBoilers } from './boilers-vertical.ts';
 import { makeOrder, seedOrders } from './orders.ts';
@@ -20,6 +21,7 @@ export async function seedIfEmpty(deps: Deps, say: (line: string) => void): Prom
   say('loading the demonstration (once, under a minute)');
   const world = await makePeople(deps);
   await makeSurveyors(world);
+  await keepEngines(world);
   say('  people and surveyors');
   const made = new Map<string, MadeBoiler>();
   // The longest listed first, as it was.

@@ -39,7 +39,7 @@ export const metalTemperature = (pressurePa: number, marginK: number): Line =>
     },
     compute: ({ T_s, ΔT }) => T_s + ΔT,
     source: marginK === 0 ? 'steam-saturation' : 'metal-margin',
-    holds: 'Metal wetted on the other side. Metal above the water is hotter than this.',
+    holds: 'Metal wetted on the other side. Metal above the water is hotter than this',
   });
 
 const kelvinOf = (fahrenheit: number): number => fahrenheit * kelvinPerFahrenheit + fahrenheitZeroK;

@@ -56,6 +56,8 @@ export interface PartOutcome {
   standsPa: number | null;
   /** The line that governs this part. */
   governing: Line | null;
+  /** Heat and stress of its metal. */
+  metal: readonly Line[];
   lines: readonly Line[];
   refusal: Refusal | null;
 }
@@ -66,24 +68,26 @@ export interface PartsOutcome {
   weakest: PartOutcome | null;
 }
 
-const refused = (id: PartId, refusal: Refusal, lines: readonly Line[] = []): PartOutcome => ({
+const refused = (id: PartId, refusal: Refusal, metal: readonly Line[] = []): PartOutcome => ({
   id,
   title: partTitles[id],
   standsPa: null,
   governing: null,
-  lines,
+  metal,
+  lines: [],
   refusal,
 });
 
 /** The least of several answers for one part, with all the lines. */
-const stands = (id: PartId, before: readonly Line[], answers: readonly Line[]): PartOutcome => {
+const stands = (id: PartId, metal: readonly Line[], answers: readonly Line[]): PartOutcome => {
   const governing = answers.toSorted((a, b) => a.result.value - b.result.value)[0] ?? null;
   return {
     id,
     title: partTitles[id],
     standsPa: governing?.result.value ?? null,
     governing,
-    lines: [...before, ...answers],
+    metal,
+    lines: answers,
     refusal: null,
   };
 };
@@ -168,7 +172,8 @@ function fluedPart(
     title: partTitles[id],
     standsPa: flue.least.result.value,
     governing: flue.least,
-    lines: [...metal.lines, ...flue.lines],
+    metal: metal.lines,
+    lines: flue.lines,
     refusal: null,
   };
 }
@@ -210,7 +215,8 @@ function staysOf(input: PartsInput, stays: NonNullable<PartsInput['stays']>): Pa
     title: partTitles.stays,
     standsPa: outcome.least.result.value,
     governing: outcome.least,
-    lines: [...metal.lines, ...outcome.lines],
+    metal: metal.lines,
+    lines: outcome.lines,
     refusal: null,
   };
 }

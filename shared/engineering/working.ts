@@ -85,10 +85,15 @@ export const formulaText = ({ result, formula }: Line): string =>
 /** The formula with each symbol's figure and unit in its place, as the reader measures. */
 export function substitutedText(line: Line, units: UnitSystem): string {
   const by = new Map(line.terms.map((term) => [term.symbol, term]));
-  return line.formula.replace(inBraces, (_, symbol: string) => {
-    const term = by.get(symbol);
-    return term === undefined ? symbol : quantityText(term.quantity, line.units ?? units, term.value);
-  });
+  // Units have points of their own: what is multiplied is set apart by a cross.
+  return line.formula
+    .replaceAll('·', ' × ')
+    .replace(/\{([^}]+)\}([²³^])?/g, (_, symbol: string, power: string | undefined) => {
+      const term = by.get(symbol);
+      const text = term === undefined ? symbol : quantityText(term.quantity, line.units ?? units, term.value);
+      // The power is of the figure and its unit together.
+      return power === undefined ? text : `(${text})${power}`;
+    });
 }
 
 /** What the line comes to, as the reader measures. */

@@ -18,6 +18,7 @@ import {
   givenSurveyor,
   surveyorTerms,
 } from '#tests/support/orders.ts';
+import { anEngine } from '#tests/support/engines.ts';
 import { givenSite } from '#tests/support/site.ts';
 import type { Site, TestPerson } from '#tests/support/site.ts';
 
@@ -243,6 +244,17 @@ const table: Record<string, Row> = {
   checkReport: [({ reviewed, filed }) => of(reviewed, 'get', `/api/checks/${filed.checkCode}`), everyone],
   getMethod: [({ placed }) => of(placed, 'get', '/api/method'), everyone],
   scoreBySurveyMethod: [({ placed }) => of(placed, 'post', '/api/method/score', score()), everyone],
+  listEngines: [({ placed }) => of(placed, 'get', '/api/engines'), members],
+  keepEngine: [({ placed }) => of(placed, 'post', '/api/engines', anEngine), members],
+  // Kept by nobody of the cast: to every member it is not there.
+  changeEngine: [
+    ({ placed }) => of(placed, 'put', `/api/engines/${randomUUID()}`, anEngine),
+    [401, 404, 404, 404, 404, 404, 404],
+  ],
+  forgetEngine: [
+    ({ placed }) => of(placed, 'delete', `/api/engines/${randomUUID()}`),
+    [401, 404, 404, 404, 404, 404, 404],
+  ],
   listWorkings: [({ placed }) => of(placed, 'get', '/api/workings'), everyone],
   ...Object.fromEntries(
     workings.map(({ calculator, endpoint }): [string, Row] => [

@@ -56,7 +56,7 @@ describe('workings by the API', () => {
     expect(answers[0]).toMatchObject({ value: 20, unit: 'bar·L', text: '20 bar·L' });
     expect(steps[0]?.lines[0]).toMatchObject({
       formula: 'PV = P·V',
-      substituted: 'PV = 5 bar·4 litres = 20 bar·L',
+      substituted: 'PV = 5 bar × 4 litres = 20 bar·L',
       source: { sureness: 'published' },
     });
   });

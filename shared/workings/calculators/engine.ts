@@ -4,12 +4,13 @@ import type { EngineFacts } from '../../engines/engine.ts';
 import { engineDemand, matchEngine, matches, sweptVolume } from '../../engineering/engine-demand.ts';
 import { bandOf, evaporationBySurface } from '../../engineering/evaporation.ts';
 import type { Band } from '../../engineering/evaporation.ts';
+import { figureText } from '../../engineering/quantities.ts';
 import { isRefusal } from '../../engineering/working.ts';
-import { rateText, trim } from '../../surveys/words.ts';
 import { calculator, curve, resultsOf, spread, steps } from '../calculator.ts';
 import { choice, figure, unknownFigure, whole } from '../field.ts';
 import type { InputOf } from '../field.ts';
 import { workingPressure, workingRange } from '../ranges.ts';
+import { rateBandText } from '../say.ts';
 
 const engine = { part: 'Engine' };
 const boiler = { part: 'Boiler' };
@@ -89,9 +90,7 @@ export const engineCalculator = calculator({
       const estimated = evaporationBySurface(input.firing, input.surfaceM2);
       return {
         answers: resultsOf(demand.low, demand.high),
-        says: [
-          `The engine takes ${rateText(demand.low.result.value)} to ${rateText(demand.high.result.value)}. What the boiler makes is not known.`,
-        ],
+        says: [`The engine takes ${rateBandText(bandOf(demand))}. What the boiler makes is not known.`],
         steps: [demandSteps, steps('What the boiler makes', ...(isRefusal(estimated) ? [estimated] : []))],
       };
     }
@@ -110,8 +109,8 @@ export const engineCalculator = calculator({
       ),
       says: [
         `${matches[match.id]}.`,
-        `The engine takes ${rateText(demand.low.result.value)} to ${rateText(demand.high.result.value)}; the boiler makes ${made.low === made.high ? rateText(made.high) : `${rateText(made.low)} to ${rateText(made.high)}`}, ${input.measuredKgPerH === null ? 'as estimated' : 'as timed'}.`,
-        `The fastest it could keep the engine at is ${trim(slow, 0)} to ${trim(fast, 0)} rpm.`,
+        `The engine takes ${rateBandText(bandOf(demand))}; the boiler makes ${rateBandText(made)}, ${input.measuredKgPerH === null ? 'as estimated' : 'as timed'}.`,
+        `The fastest it could keep the engine at is ${figureText(slow)} to ${figureText(fast)} rpm.`,
       ],
       steps: [
         demandSteps,

@@ -10,11 +10,11 @@ import {
 import type { Band, BandLines } from '../../engineering/evaporation.ts';
 import { isRefusal, work } from '../../engineering/working.ts';
 import type { Line, Refusal } from '../../engineering/working.ts';
-import { rateText } from '../../surveys/words.ts';
 import { calculator, curve, resultsOf, spread, steps } from '../calculator.ts';
 import type { Steps } from '../calculator.ts';
 import { choice, figure, unknownFigure } from '../field.ts';
 import { workingPressure } from '../ranges.ts';
+import { rateBandText } from '../say.ts';
 
 const timedFeed = (waterL: number, minutes: number): Line =>
   work({
@@ -81,9 +81,7 @@ export const evaporationCalculator = calculator({
       says: [
         best === null
           ? 'Cannot say: measure the heating surface, or time the feed in a steam test.'
-          : best.band.low === best.band.high
-            ? `${rateText(best.band.high)}, ${best.how}.`
-            : `${rateText(best.band.low)} to ${rateText(best.band.high)}, ${best.how}. A timed feed beats any estimate.`,
+          : `${rateBandText(best.band)}, ${best.how}.${timed === null ? ' A timed feed beats any estimate.' : ''}`,
       ],
       steps: [
         ...(timed === null ? [] : [steps('Timed', timed)]),

@@ -6,12 +6,13 @@ import { partTitles, pressureByParts, wallNeeded } from '../../engineering/parts
 import type { PartOutcome, PartsInput } from '../../engineering/parts.ts';
 import { stayEndings } from '../../engineering/plates.ts';
 import { seamEfficiencies } from '../../engineering/shell.ts';
-import { lengthText, listText, pressureText } from '../../surveys/words.ts';
+import { listText, pressureText } from '../../surveys/words.ts';
 import { calculator, curve, spread } from '../calculator.ts';
 import type { Mistake, Plot, Steps } from '../calculator.ts';
 import { choice, figure, labelsOf, unknownFigure } from '../field.ts';
 import type { InputOf } from '../field.ts';
 import { acrossRange, wallRange, workingPressure } from '../ranges.ts';
+import { lengthText } from '../say.ts';
 
 const ifPlates = (...is: string[]) => ({ field: 'plates', is });
 const ifFlue = { field: 'flue', is: ['fitted'] };
@@ -56,7 +57,7 @@ const fields = {
     when: ifPlates('stays'),
   }),
   flue: choice('Flue', { none: 'None', fitted: 'One flue' }, 'none', { part: 'Flue' }),
-  flueOutsideMm: unknownFigure('Flue, outside diameter', 'length', [5, 600], 38, {
+  flueOutsideMm: unknownFigure('Flue, outside diameter', 'length', [5, 650], 38, {
     part: 'Flue',
     when: ifFlue,
   }),
@@ -201,6 +202,20 @@ const stepsOf = ({ title, lines, refusal, governing }: PartOutcome): Steps => ({
   refusals: refusal === null ? [] : [refusal],
 });
 
+/** Heat and stress of the metal, once for the parts in the fire and once for those outside it. */
+function metalSteps(parts: readonly PartOutcome[]): Steps[] {
+  const byHeat = new Map<string, PartOutcome[]>();
+  for (const part of parts) {
+    const heat = String(part.metal[0]?.result.value ?? '');
+    if (heat !== '') byHeat.set(heat, [...(byHeat.get(heat) ?? []), part]);
+  }
+  return [...byHeat.values()].map((alike) => ({
+    title: `Metal of ${listText(alike.map(({ id }) => partTitles[id].toLowerCase()))}`,
+    lines: alike[0]?.metal ?? [],
+    refusals: [],
+  }));
+}
+
 /** What each pressure part stands, and which governs. */
 export const pressureByPartsCalculator = calculator({
   id: 'pressure-by-parts',
@@ -230,7 +245,7 @@ export const pressureByPartsCalculator = calculator({
       ...(needed === null
         ? []
         : [
-            `A barrel of this size needs a wall of at least ${lengthText(needed)} (${(needed / 25.4).toFixed(3)} in) for ${pressureText(input.workingPa)}, with nothing added for wear.`,
+            `A barrel of this size needs a wall of at least ${lengthText(needed)} for ${pressureText(input.workingPa)}, with nothing added for wear.`,
           ]),
       jointSays(input),
     ];
@@ -244,7 +259,7 @@ export const pressureByPartsCalculator = calculator({
         ),
       ],
       says,
-      steps: parts.map(stepsOf),
+      steps: [...metalSteps(parts), ...parts.map(stepsOf)],
     };
   },
   plot: (input): Plot => {

@@ -9,10 +9,11 @@ import {
 } from '../../engineering/safety-valve.ts';
 import { atmospherePa, saturatedAt } from '../../engineering/steam.ts';
 import { isRefusal, valueOf, work } from '../../engineering/working.ts';
-import { pressureText, rateText } from '../../surveys/words.ts';
+import { pressureText } from '../../surveys/words.ts';
 import { calculator, curve, resultsOf, spread, steps } from '../calculator.ts';
 import { choice, figure, unknownFigure, whole } from '../field.ts';
 import { workingPressure } from '../ranges.ts';
+import { rateBandText, rateText } from '../say.ts';
 
 /** What a safety valve passes, against what the fire makes. */
 export const safetyValveCalculator = calculator({
@@ -93,9 +94,7 @@ export const safetyValveCalculator = calculator({
 });
 
 function compareSays(passed: number, made: { low: number; high: number }, isMeasured: boolean): string {
-  const makes =
-    made.low === made.high ? rateText(made.high) : `${rateText(made.low)} to ${rateText(made.high)}`;
-  const told = `The valves pass ${rateText(passed)}; the fire makes ${makes}, ${isMeasured ? 'as timed' : 'as estimated'}.`;
+  const told = `The valves pass ${rateText(passed)}; the fire makes ${rateBandText(made)}, ${isMeasured ? 'as timed' : 'as estimated'}.`;
   if (passed >= made.high) return `${told} By calculation they pass it all; prove it under full fire.`;
   return passed < made.low
     ? `${told} They are too small by calculation: do not rely on them unless a test under full fire has proved them.`

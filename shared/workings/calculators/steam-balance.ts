@@ -6,11 +6,12 @@ import { liftLabels, valveCapacityLines } from '../../engineering/safety-valve.t
 import { feedWanted, waterReserve } from '../../engineering/water.ts';
 import { isRefusal } from '../../engineering/working.ts';
 import type { Line, Refusal } from '../../engineering/working.ts';
-import { rateText, trim } from '../../surveys/words.ts';
+import { trim } from '../../surveys/words.ts';
 import { calculator, resultsOf, steps } from '../calculator.ts';
 import { choice, figure, labelsOf, unknownFigure, whole } from '../field.ts';
 import type { InputOf } from '../field.ts';
 import { workingPressure } from '../ranges.ts';
+import { rateBandText, rateText } from '../say.ts';
 
 const made = { part: 'Steam made' };
 const fire = { part: 'Gas fire', when: { field: 'firing', is: ['gas'] } };
@@ -66,16 +67,13 @@ function fireOf(input: Input): Fire | null {
   return { lines: [...flow, heat, volume, air], heatKw: heat.result.value, airM3PerH: air.result.value };
 }
 
-const bandText = ({ low, high }: Band): string =>
-  low === high ? rateText(high) : `${rateText(low)} to ${rateText(high)}`;
-
 /** Whether what the fire could make and what was found agree. */
 function agreementSays({ band }: Made, fire: Band): string {
   if (fire.high < band.low)
-    return `The fire could make ${bandText(fire)} at most: less than the figure above. The fire is the limit, or a figure is wrong.`;
+    return `The fire could make ${rateBandText(fire)} at most: less than the figure above. The fire is the limit, or a figure is wrong.`;
   return fire.low > band.high
-    ? `The fire could make ${bandText(fire)}: more than the figure above. Heat is going up the chimney, or a figure is wrong.`
-    : `The fire could make ${bandText(fire)}: the two agree.`;
+    ? `The fire could make ${rateBandText(fire)}: more than the figure above. Heat is going up the chimney, or a figure is wrong.`
+    : `The fire could make ${rateBandText(fire)}: the two agree.`;
 }
 
 /** Fire, steam, valve, feed, water and air in one account. */
@@ -123,7 +121,7 @@ export const steamBalanceCalculator = calculator({
       says: [
         steam === null
           ? 'Steam made: cannot say. Measure the heating surface, or time the feed in a steam test.'
-          : `Steam made: ${bandText(steam.band)}, ${steam.how}.`,
+          : `Steam made: ${rateBandText(steam.band)}, ${steam.how}.`,
         ...(steam !== null && byFire !== null && !isRefusal(byFire)
           ? [`Fire: ${trim(fire?.heatKw ?? 0, 2)} kW. ${agreementSays(steam, bandOf(byFire))}`]
           : []),

@@ -1,7 +1,8 @@
 import { echoThickness, trueThickness, waveSpeeds } from '../../engineering/thickness.ts';
-import { lengthText, trim } from '../../surveys/words.ts';
+import { trim } from '../../surveys/words.ts';
 import { calculator, resultsOf, steps } from '../calculator.ts';
 import { choice, figure, labelsOf, unknownFigure } from '../field.ts';
+import { lengthText } from '../say.ts';
 
 /** What a wall-thickness meter really read. */
 export const wallMeterCalculator = calculator({

@@ -6,10 +6,11 @@ import {
   waterReserve,
 } from '../../engineering/water.ts';
 import { isRefusal } from '../../engineering/working.ts';
-import { rateText, trim } from '../../surveys/words.ts';
+import { trim } from '../../surveys/words.ts';
 import { calculator, curve, resultsOf, spread, steps } from '../calculator.ts';
 import { figure } from '../field.ts';
 import { workingPressure } from '../ranges.ts';
+import { rateText } from '../say.ts';
 
 const pump = { part: 'Feed pump' };
 

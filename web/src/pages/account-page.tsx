@@ -6,6 +6,7 @@ import { NameForm } from '#web/features/accounts/name-form.tsx';
 import { accountQueries, useResendVerification, useSignOut } from '#web/features/accounts/queries.ts';
 import { SecondFactor } from '#web/features/accounts/second-factor.tsx';
 import { useSignedIn } from '#web/features/accounts/use-me.ts';
+import { EngineList } from '#web/features/engines/engine-list.tsx';
 import { formatInstant } from '#web/lib/format.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { Button, ButtonLink } from '#web/ui/button.tsx';
@@ -110,6 +111,9 @@ export function Component() {
       </Section>
       <Section title="E-mail address">
         <Address />
+      </Section>
+      <Section title="My engines">
+        <EngineList />
       </Section>
       <Section title="Second factor">
         <SecondFactor me={me} />

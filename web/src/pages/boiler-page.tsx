@@ -4,13 +4,17 @@ import type { Listing } from '#shared/listings/contract.ts';
 import { laggingAnswers } from '#shared/listings/draft.ts';
 import { listingStatusLabels } from '#shared/listings/machine.ts';
 import { sitePaths } from '#shared/site-paths.ts';
+import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
 import { useMe } from '#web/features/accounts/use-me.ts';
-import { FittingsAndPapers, Implied, Nameplate, Sizes } from '#web/features/listings/facts.tsx';
+import { FittingsAndPapers, Nameplate, Sizes } from '#web/features/listings/facts.tsx';
 import { listingQueries } from '#web/features/listings/queries.ts';
 import { ReportsList } from '#web/features/listings/reports-list.tsx';
 import { SellerActions } from '#web/features/listings/seller-actions.tsx';
 import { unknownsOf } from '#web/features/listings/unknowns.ts';
 import { TakeDown } from '#web/features/office/take-down.tsx';
+import { EngineMatches } from '#web/features/workings/engine-matches.tsx';
+import { ImpliedList } from '#web/features/workings/implied-list.tsx';
+import { TestsDue } from '#web/features/workings/tests-due.tsx';
 import { formatDay, formatInstant, formatMoney, formatRough } from '#web/lib/format.ts';
 import { ButtonLink } from '#web/ui/button.tsx';
 import { Caution, Notice } from '#web/ui/notes.tsx';
@@ -86,7 +90,9 @@ export function Component() {
   const { data: listing } = useSuspenseQuery(listingQueries.detail(slug));
   const { facts, declaration } = listing;
   const unknowns = unknownsOf(facts);
-  const isOffice = useMe()?.roles.includes('office') ?? false;
+  const me = useMe();
+  const isOffice = me?.roles.includes('office') ?? false;
+  const boiler: KnownBoiler = { facts, items: [], record: null };
   return (
     <Page
       title={listing.title}
@@ -144,6 +150,7 @@ export function Component() {
           </Section>
           <Section title="Fittings and papers">
             <FittingsAndPapers facts={facts} />
+            <TestsDue facts={facts} />
           </Section>
           <Section title="History">
             <History listing={listing} />
@@ -154,7 +161,14 @@ export function Component() {
             <Sizes facts={facts} />
           </Section>
           <Section title="What the figures imply">
-            <Implied facts={facts} />
+            <ImpliedList boiler={boiler} />
+            <p className="mt-2 text-sm text-pencil">
+              Worked out from the seller’s figures, which nobody has checked unless a report says so. Each
+              leads to its working. The local code governs.
+            </p>
+          </Section>
+          <Section title="Will it drive my engine">
+            <EngineMatches boiler={boiler} isMember={me !== null} />
           </Section>
           <Section title="Not known">
             {unknowns.length === 0 ? (

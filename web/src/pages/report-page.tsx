@@ -1,7 +1,10 @@
-import { useSuspenseQuery } from '@tanstack/react-query';
+import { useSuspenseQueries } from '@tanstack/react-query';
 import { Link, useParams } from 'react-router-dom';
+import { examinedOf } from '#shared/surveys/examined.ts';
 import { extras, scopes } from '#shared/surveys/scopes.ts';
+import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
 import { sitePaths } from '#shared/site-paths.ts';
+import { useMe } from '#web/features/accounts/use-me.ts';
 import { AcceptReport } from '#web/features/reports/accept-report.tsx';
 import { ChecksList } from '#web/features/reports/checks-list.tsx';
 import { foundId } from '#web/features/reports/found-item.tsx';
@@ -11,7 +14,11 @@ import { PutRight } from '#web/features/reports/put-right.tsx';
 import { reportQueries } from '#web/features/reports/queries.ts';
 import { ResultSummary } from '#web/features/reports/result-summary.tsx';
 import { SectionMeans } from '#web/features/reports/section-means.tsx';
+import { SurveyedTwice } from '#web/features/reports/surveyed-twice.tsx';
 import { HydraulicRecord, SteamRecord } from '#web/features/reports/test-records.tsx';
+import { EngineMatches } from '#web/features/workings/engine-matches.tsx';
+import { PartsTable } from '#web/features/workings/parts-table.tsx';
+import { WorkingLinks } from '#web/features/workings/working-links.tsx';
 import { formatDay, formatInstant } from '#web/lib/format.ts';
 import { useUnits } from '#web/lib/units.tsx';
 import { TitleBlock } from '#web/ui/figures.tsx';
@@ -22,9 +29,13 @@ import { PhotoViewer } from '#web/ui/photo-viewer.tsx';
 /** A filed report, for anyone. */
 export function Component() {
   const { id = '' } = useParams();
-  const { data: report } = useSuspenseQuery(reportQueries.detail(id));
+  const [{ data: report }, { data: agreements }] = useSuspenseQueries({
+    queries: [reportQueries.detail(id), reportQueries.agreements(id)],
+  });
   const { show } = useUnits();
+  const me = useMe();
   const { listing, surveyor, facts, scope, record, result, photos, sellerPhotos, viewer } = report;
+  const boiler: KnownBoiler = { facts, items: examinedOf({ facts, record }), record };
   const examined = record.examinedOn === null ? formatInstant(report.filedAt) : formatDay(record.examinedOn);
   const covered = [scopes[scope].label, ...report.extras.map((extra) => extras[extra].label)];
   return (
@@ -72,6 +83,11 @@ export function Component() {
       <Section title="What was found">
         <FoundList report={report} />
       </Section>
+      {agreements.items.length > 0 && (
+        <Section title={agreements.items.length === 1 ? 'Surveyed twice' : 'Surveyed more than once'}>
+          <SurveyedTwice others={agreements.items} />
+        </Section>
+      )}
       <div className="mt-10 grid gap-x-10 lg:grid-cols-2">
         <Section title="Hydraulic test">
           <HydraulicRecord report={report} />
@@ -82,8 +98,18 @@ export function Component() {
           </Section>
         </div>
       </div>
+      <Section title="Pressure by parts">
+        <PartsTable boiler={boiler} />
+      </Section>
       <Section title="Engineering checks">
         <ChecksList checks={result.checks} />
+        <div className="mt-4">
+          <h3 className="mb-1">How these are worked out</h3>
+          <WorkingLinks boiler={boiler} />
+        </div>
+      </Section>
+      <Section title="Will it drive my engine">
+        <EngineMatches boiler={boiler} isMember={me !== null} />
       </Section>
       <Section title="Instruments">
         <InstrumentsTable record={record} />
@@ -102,7 +128,7 @@ export function Component() {
           <li>What is marked Not examined was not examined, and nothing is implied about it.</li>
           <li>
             It was scored by the{' '}
-            <Link className="link" to={sitePaths.method}>
+            <Link className="link" to={sitePaths.methodVersion(record.rubricVersion)}>
               published method
             </Link>
             , version {record.rubricVersion}; anyone can work it out again from what is recorded here.

@@ -4,6 +4,8 @@ import { sitePaths } from '#shared/site-paths.ts';
 import type { Calculator } from '#shared/workings/calculator.ts';
 import { calculatorOf } from '#shared/workings/index.ts';
 import { quantityText } from '#shared/engineering/quantities.ts';
+import { useMe } from '#web/features/accounts/use-me.ts';
+import { EnginePicker } from '#web/features/engines/engine-picker.tsx';
 import { CalculatorForm } from '#web/features/workings/calculator-form.tsx';
 import { Answers, OutcomePlot } from '#web/features/workings/outcome-view.tsx';
 import { UnitsSwitch } from '#web/features/workings/units-switch.tsx';
@@ -53,6 +55,7 @@ function AnswerBar({ label, text }: { label: string; text: string }) {
 function WorkingPage({ calculator }: { calculator: Calculator }) {
   const { inputs, errors, outcome, plot, change, reset } = useWorking(calculator);
   const { units } = useUnits();
+  const me = useMe();
   const [workedOn] = useState(() => formatDay(new Date().toISOString().slice(0, 10)));
   const first = outcome?.answers[0];
   return (
@@ -67,6 +70,15 @@ function WorkingPage({ calculator }: { calculator: Calculator }) {
             <h2>Figures</h2>
             <UnitsSwitch />
           </div>
+          {calculator.id === 'engine' && me !== null && (
+            <div className="no-print mb-4">
+              <EnginePicker
+                onPick={(engine) => {
+                  change({ ...engine });
+                }}
+              />
+            </div>
+          )}
           <CalculatorForm calculator={calculator} inputs={inputs} errors={errors} onChange={change} />
           <div className="no-print mt-4">
             <Button kind="plain" onClick={reset}>

@@ -25,8 +25,18 @@ export function readNumber(text: string): number | null {
   return plain !== '' && /^-?\d*\.?\d+$/.test(plain) ? Number(plain) : null;
 }
 
-const shown = (quantity: Quantity, units: Units, value: number | null): string =>
-  value === null ? '' : String(Number(fromSi(quantity, units, value).toPrecision(6)));
+/** As fine as the trade reads: a thou, a tenth of a pound; other figures to five places. */
+const places: Partial<Record<Quantity, Record<Units, number>>> = {
+  pressure: { imperial: 1, metric: 2 },
+  length: { imperial: 3, metric: 2 },
+};
+
+function shown(quantity: Quantity, units: Units, value: number | null): string {
+  if (value === null) return '';
+  const figure = fromSi(quantity, units, value);
+  const digits = places[quantity]?.[units];
+  return String(Number(digits === undefined ? figure.toPrecision(5) : figure.toFixed(digits)));
+}
 
 /** A figure in the person's own units, kept in SI. What was typed stays as typed, even when it is not a figure. */
 export function QuantityInput({ label, quantity, value, onChange, hint, error, isOptional = false }: Props) {

@@ -1,5 +1,4 @@
 import {
-  barLitres,
   constructions,
   firings,
   fittings,
@@ -73,31 +72,6 @@ export function Sizes({ facts }: { facts: BoilerFacts }) {
           : [{ label: 'Weight', value: show('mass', dimensions.weightKg) }]),
       ]}
     />
-  );
-}
-
-/** What follows from the figures by arithmetic alone; the code and the inspector decide the rest. */
-export function Implied({ facts }: { facts: BoilerFacts }) {
-  const { show } = useUnits();
-  const product = barLitres(facts);
-  return (
-    <>
-      <KeyFigures
-        items={[
-          { label: 'First hydraulic test, twice', value: show('pressure', facts.workingPressurePa * 2) },
-          { label: 'Repeat test, once and a half', value: show('pressure', facts.workingPressurePa * 1.5) },
-          { label: 'Bar·litres', value: formatNumber(product, 1) },
-          {
-            label: 'Falls in the part of the UK hobby code for',
-            value: product < 3 ? 'under 3 bar·litres' : '3 bar·litres and over',
-          },
-        ]}
-      />
-      <p className="mt-2 text-sm text-pencil">
-        Worked out from the seller’s figures, which nobody has checked unless a report says so. The local code
-        governs.
-      </p>
-    </>
   );
 }
 

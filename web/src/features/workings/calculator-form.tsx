@@ -6,12 +6,16 @@ interface Props {
   calculator: Calculator;
   inputs: Inputs;
   errors: Readonly<Record<string, string>>;
-  onChange: (name: string, value: unknown) => void;
+  onChange: (changes: Inputs) => void;
 }
 
 /** Whether a field has anything to say, given the choices made. */
 export const isShown = ({ when }: Field, inputs: Inputs): boolean =>
   when === null || when.is.includes(String(inputs[when.field]));
+
+/** Whether a list's words want the whole width. */
+const isLong = ({ control }: Field): boolean =>
+  control.kind === 'choice' && Object.values(control.options).some((words) => words.length > 18);
 
 /** The inputs of a calculator, under their headings. */
 export function CalculatorForm({ calculator, inputs, errors, onChange }: Props) {
@@ -35,16 +39,16 @@ export function CalculatorForm({ calculator, inputs, errors, onChange }: Props) 
             {shown
               .filter(([, field]) => field.part === part)
               .map(([name, field]) => (
-                <FieldInput
-                  key={name}
-                  name={name}
-                  field={field}
-                  value={inputs[name]}
-                  error={errors[name]}
-                  onChange={(value) => {
-                    onChange(name, value);
-                  }}
-                />
+                <div key={name} className={isLong(field) ? 'sm:col-span-2 lg:col-span-1 xl:col-span-2' : ''}>
+                  <FieldInput
+                    field={field}
+                    value={inputs[name]}
+                    error={errors[name]}
+                    onChange={(value) => {
+                      onChange({ [name]: value });
+                    }}
+                  />
+                </div>
               ))}
           </div>
         </fieldset>

@@ -6,7 +6,6 @@ import { QuantityInput } from '#web/ui/quantity-input.tsx';
 import { Select } from '#web/ui/select.tsx';
 
 interface Props {
-  name: string;
   field: Field;
   value: unknown;
   error: string | undefined;

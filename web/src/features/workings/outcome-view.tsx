@@ -1,7 +1,6 @@
 import { fromKept, quantityText, unitOf } from '#shared/engineering/quantities.ts';
 import type { Outcome, Plot as PlotData } from '#shared/workings/calculator.ts';
 import { useUnits } from '#web/lib/units.tsx';
-import { Formula } from '#web/ui/formula.tsx';
 import { Plot } from '#web/ui/plot.tsx';
 
 /** What came of it: the figures wanted, and what they mean. */
@@ -32,9 +31,7 @@ export function Answers({ outcome }: { outcome: Outcome }) {
               key={term.symbol + term.label}
               className="flex items-baseline justify-between gap-4 border-b border-rule py-2"
             >
-              <dt className="text-pencil">
-                {term.label} <Formula text={term.symbol} />
-              </dt>
+              <dt className="text-pencil">{term.label}</dt>
               <dd className="text-right font-medium">{quantityText(term.quantity, units, term.value)}</dd>
             </div>
           ))}

@@ -10,7 +10,7 @@ interface Working {
   /** Null while something given cannot be. */
   outcome: Outcome | null;
   plot: Plot | null;
-  change: (name: string, value: unknown) => void;
+  change: (changes: Inputs) => void;
   reset: () => void;
 }
 
@@ -51,8 +51,8 @@ export function useWorking(calculator: Calculator): Working {
   return {
     ...result,
     inputs,
-    change: (name, value) => {
-      put({ ...inputs, [name]: value });
+    change: (changes) => {
+      put({ ...inputs, ...changes });
     },
     reset: () => {
       put(calculator.initial);

@@ -14,41 +14,44 @@ function WorkingLine({ line }: { line: Line }) {
   const { units } = useUnits();
   const source = sourceOf(line);
   return (
-    <div className="break-inside-avoid border-b border-rule py-3">
-      <p className="font-medium">{line.result.label}</p>
-      <div className="grid gap-1 overflow-x-auto py-1 leading-7">
+    <div className="grid break-inside-avoid gap-x-10 gap-y-2 border-b border-rule py-3 md:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
+      <div>
+        <p className="font-medium">{line.result.label}</p>
+        <div className="grid gap-0.5 leading-7">
+          {!isLookedUp(line) && (
+            <>
+              <p>
+                <Formula text={formulaText(line)} />
+              </p>
+              <p>
+                <Formula text={`${line.result.symbol} = ${substitutedText(line, units)}`} />
+              </p>
+            </>
+          )}
+          <p>
+            <Formula text={`${line.result.symbol} = `} />
+            <strong className="font-bold">{resultText(line, units)}</strong>
+          </p>
+        </div>
+      </div>
+      <div className="grid content-start gap-1 text-sm leading-5 text-pencil">
         {!isLookedUp(line) && (
-          <>
-            <p>
-              <Formula text={formulaText(line)} />
-            </p>
-            <p>
-              <Formula text={`${line.result.symbol} = ${substitutedText(line, units)}`} />
-            </p>
-          </>
+          <ul>
+            {line.terms.map((term) => (
+              <li key={term.symbol} className="flex justify-between gap-4">
+                <span>
+                  <Formula text={term.symbol} /> {term.label.charAt(0).toLowerCase() + term.label.slice(1)}
+                </span>
+                <span className="text-right whitespace-nowrap">{termText(term, units)}</span>
+              </li>
+            ))}
+          </ul>
         )}
+        <p>Range: {line.holds}.</p>
         <p>
-          <Formula text={`${line.result.symbol} = `} />
-          <strong className="font-bold">{resultText(line, units)}</strong>
+          From: {source.title}. <span className="text-ink">{surenesses[source.sureness]}.</span>
         </p>
       </div>
-      {!isLookedUp(line) && (
-        <ul className="flex flex-wrap gap-x-5 text-sm text-pencil">
-          {line.terms.map((term) => (
-            <li key={term.symbol}>
-              <Formula text={term.symbol} /> {term.label.charAt(0).toLowerCase() + term.label.slice(1)}{' '}
-              {termText(term, units)}
-            </li>
-          ))}
-        </ul>
-      )}
-      <p className="mt-1 text-sm text-pencil">
-        {line.holds}. {source.title}.{' '}
-        <em className="not-italic underline decoration-rule underline-offset-4">
-          {surenesses[source.sureness]}
-        </em>
-        .
-      </p>
     </div>
   );
 }

@@ -1,0 +1,56 @@
+import { partsOf, weakestOf } from '#shared/surveys/parts.ts';
+import type { BoilerPart } from '#shared/surveys/parts.ts';
+import { partsInputs } from '#shared/workings/from-boiler.ts';
+import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
+import { useUnits } from '#web/lib/units.tsx';
+import { Table } from '#web/ui/table.tsx';
+import { WorkingLink } from './working-link.tsx';
+
+/** What each pressure part stands against the claimed working pressure, and which governs. */
+export function PartsTable({ boiler }: { boiler: KnownBoiler }) {
+  const { show } = useUnits();
+  const { facts } = boiler;
+  const parts = partsOf(facts, boiler.items);
+  const weakest = weakestOf(parts);
+  const stands = ({ standsPa, refusal }: BoilerPart) =>
+    standsPa === null ? (refusal?.text ?? 'Cannot say') : show('pressure', standsPa);
+  return (
+    <div className="grid gap-3">
+      <Table
+        caption="Pressure by parts"
+        isCaptionHidden
+        rows={parts}
+        keyOf={({ id }) => id}
+        columns={[
+          {
+            head: 'Part',
+            cell: (part) => (
+              <>
+                {part.title}
+                {part.id === weakest?.id && <span className="text-pencil"> (governs)</span>}
+              </>
+            ),
+          },
+          {
+            head: 'Thickness or diameter',
+            isNumber: true,
+            cell: ({ thicknessMm }) => show('length', thicknessMm),
+          },
+          {
+            head: 'Taken from',
+            cell: ({ thicknessMm, isMeasured }) =>
+              thicknessMm === null ? '–' : isMeasured ? 'Measured' : 'The seller',
+          },
+          { head: 'By calculation', cell: stands },
+        ]}
+      />
+      <p className="text-sm text-pencil">
+        For {show('pressure', facts.workingPressurePa)} claimed. A calculation is no test: it speaks of
+        figures, not of joints.{' '}
+        <WorkingLink calculator="pressure-by-parts" inputs={partsInputs(boiler)} of="Pressure by parts">
+          See every line
+        </WorkingLink>
+      </p>
+    </div>
+  );
+}
