@@ -6,6 +6,28 @@ export const surveys: Record<string, SeedSurvey> = {
     scope: 'full',
     findings: {
       'shell.barrel': { grade: 'sound', measurements: [{ quantity: 'thinnestMm', value: 2.58 }] },
+      'shell.plates': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'thinnestMm', value: 3.2 },
+          { quantity: 'supportPitchMm', value: 21 },
+        ],
+      },
+      'shell.flue': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'thinnestMm', value: 1.98 },
+          { quantity: 'lengthMm', value: 205 },
+        ],
+      },
+      'shell.stays': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'pitchMm', value: 24 },
+          { quantity: 'diameterMm', value: 4.76 },
+          { quantity: 'threadsPerInch', value: 40 },
+        ],
+      },
       'shell.joints': {
         grade: 'sound',
         measurements: [{ quantity: 'jointMaterial', value: 'silver-solder' }],
@@ -29,7 +51,14 @@ export const surveys: Record<string, SeedSurvey> = {
           { quantity: 'valvesFitted', value: 1 },
         ],
       },
-      'safety.glass': { grade: 'sound', measurements: [{ quantity: 'lowestLevelAboveCrownMm', value: 9 }] },
+      'safety.glass': {
+        grade: 'sound',
+        measurements: [
+          { quantity: 'lowestLevelAboveCrownMm', value: 9 },
+          { quantity: 'waterInGlassL', value: 0.19 },
+        ],
+      },
+      'feed.first': { grade: 'sound', measurements: [{ quantity: 'deliveryKgPerH', value: 5.4 }] },
       'casing.finish': { grade: 'serviceable', defects: [{ code: 'finish-tarnished', note: 'Honest use.' }] },
       'safety.valve': { grade: 'sound', note: 'Both valves tried, second lifts 3 psi above the first.' },
       'shell.fireside': { grade: 'serviceable', note: 'Light soot in the return tubes, brushes out.' },

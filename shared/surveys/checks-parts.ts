@@ -8,8 +8,10 @@ import { inSentence, lengthText, listText, pressureText } from './words.ts';
 const partFigure = ({ title, standsPa }: BoilerPart): Figure[] =>
   standsPa === null ? [] : [figure(`${title}, by calculation`, Math.floor(standsPa), 'Pa')];
 
-const toldOf = ({ title, thicknessMm, standsPa }: BoilerPart): string =>
-  `${title} at ${lengthText(thicknessMm ?? 0)} comes to ${pressureText(Math.floor(standsPa ?? 0))} by calculation`;
+const toldOf = ({ id, title, thicknessMm, standsPa }: BoilerPart): string => {
+  const comes = id === 'barrel' || id === 'flue' ? 'comes' : 'come';
+  return `${title} at ${lengthText(thicknessMm ?? 0)} ${comes} to ${pressureText(Math.floor(standsPa ?? 0))} by calculation`;
+};
 
 /** What could not be worked out, and what to measure. */
 function gapsOf(parts: readonly BoilerPart[]): string {

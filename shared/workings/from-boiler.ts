@@ -73,6 +73,13 @@ export function partsInputs({ facts, items }: KnownBoiler): Inputs {
   });
 }
 
+/** What its joints are made with. */
+export const jointsInputs = ({ facts }: KnownBoiler): Inputs =>
+  filled('joints', {
+    workingPa: facts.workingPressurePa,
+    jointMetal: jointOfConstruction[facts.construction],
+  });
+
 /** Steam at its working pressure. */
 export const steamInputs = ({ facts }: KnownBoiler): Inputs =>
   filled('saturated-steam', { pressurePa: facts.workingPressurePa });

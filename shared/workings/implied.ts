@@ -6,7 +6,6 @@ import { isRefusal } from '../engineering/working.ts';
 import type { Line, Term } from '../engineering/working.ts';
 import { weakestOf, partsOf } from '../surveys/parts.ts';
 import type { Inputs } from './calculator.ts';
-import { calculatorOf } from './index.ts';
 import {
   balanceInputs,
   barLitresInputs,
@@ -14,6 +13,7 @@ import {
   gaugeInputs,
   hydraulicInputs,
   jetInputs,
+  jointsInputs,
   partsInputs,
   steamInputs,
   testPercent,
@@ -103,26 +103,43 @@ export function impliedBy(boiler: KnownBoiler): Implied[] {
   ];
 }
 
-interface FilledIn {
-  title: string;
+/** A calculator with figures filled in. */
+export interface FilledIn {
   calculator: string;
   inputs: Inputs;
 }
 
-/** The calculators that a boiler's figures can be put through, with those figures. */
-export function workingsOf(boiler: KnownBoiler): FilledIn[] {
-  const filledIn: readonly (readonly [calculator: string, inputs: Inputs | null])[] = [
-    ['pressure-by-parts', partsInputs(boiler)],
-    ['hydraulic-test', hydraulicInputs(boiler)],
-    ['pressure-gauge', gaugeInputs(boiler)],
-    ['safety-valve', valveInputs(boiler)],
-    ['evaporation', evaporationInputs(boiler)],
-    ['gas-jet', jetInputs(boiler)],
-    ['steam-balance', balanceInputs(boiler)],
-    ['saturated-steam', steamInputs(boiler)],
-    ['bar-litres', barLitresInputs(boiler)],
-  ];
-  return filledIn.flatMap(([calculator, inputs]) =>
-    inputs === null ? [] : [{ title: calculatorOf(calculator)?.title ?? '', calculator, inputs }],
-  );
+const fillers: Readonly<Record<string, (boiler: KnownBoiler) => Inputs | null>> = {
+  'pressure-by-parts': partsInputs,
+  joints: jointsInputs,
+  'hydraulic-test': hydraulicInputs,
+  'pressure-gauge': gaugeInputs,
+  'safety-valve': valveInputs,
+  'gas-jet': jetInputs,
+  'steam-balance': balanceInputs,
+  'bar-litres': barLitresInputs,
+};
+
+/** The calculator that works out what an engineering check of a report goes by. */
+const calculatorOfCheck: Readonly<Record<string, string>> = {
+  'bar-litres': 'bar-litres',
+  'hydraulic-test': 'hydraulic-test',
+  'parts-pressure': 'pressure-by-parts',
+  'joint-material': 'joints',
+  'gauge-range': 'pressure-gauge',
+  'gauge-error': 'pressure-gauge',
+  'valve-lift': 'safety-valve',
+  accumulation: 'safety-valve',
+  'valve-reseat': 'safety-valve',
+  'valve-capacity': 'safety-valve',
+  'water-reserve': 'steam-balance',
+  'feed-rate': 'steam-balance',
+  'gas-heat': 'gas-jet',
+};
+
+/** The working behind an engineering check, with this boiler's figures; null where there is none, or too little to fill it in with. */
+export function workingOfCheck(boiler: KnownBoiler, checkId: string): FilledIn | null {
+  const calculator = calculatorOfCheck[checkId];
+  const inputs = calculator === undefined ? null : (fillers[calculator]?.(boiler) ?? null);
+  return calculator === undefined || inputs === null ? null : { calculator, inputs };
 }

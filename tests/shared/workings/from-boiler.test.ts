@@ -2,8 +2,9 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { examinedOf } from '#shared/surveys/examined.ts';
 import { partsOf } from '#shared/surveys/parts.ts';
+import { scoreSurvey } from '#shared/surveys/score.ts';
 import { calculatorOf } from '#shared/workings/index.ts';
-import { impliedBy, workingsOf } from '#shared/workings/implied.ts';
+import { impliedBy, workingOfCheck } from '#shared/workings/implied.ts';
 import { engineInputs, partsInputs } from '#shared/workings/from-boiler.ts';
 import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
 import { matchOnBoiler } from '#shared/workings/match.ts';
@@ -31,7 +32,8 @@ describe('a boiler’s figures filled into the calculators', () => {
     fc.assert(
       fc.property(anyFacts, (facts) => {
         const boiler: KnownBoiler = { facts, items: [], record: null };
-        const all = [...impliedBy(boiler), ...workingsOf(boiler)];
+        const checks = scoreSurvey(goodSurvey()).checks;
+        const all = [...impliedBy(boiler), ...checks.flatMap(({ id }) => workingOfCheck(boiler, id) ?? [])];
         for (const { calculator, inputs } of all) {
           const read = calculatorOf(calculator)!.schema.safeParse(inputs);
           expect(read.error?.issues ?? []).toEqual([]);

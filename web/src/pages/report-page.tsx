@@ -16,9 +16,9 @@ import { ResultSummary } from '#web/features/reports/result-summary.tsx';
 import { SectionMeans } from '#web/features/reports/section-means.tsx';
 import { SurveyedTwice } from '#web/features/reports/surveyed-twice.tsx';
 import { HydraulicRecord, SteamRecord } from '#web/features/reports/test-records.tsx';
+import { CheckWorking } from '#web/features/workings/check-working.tsx';
 import { EngineMatches } from '#web/features/workings/engine-matches.tsx';
 import { PartsTable } from '#web/features/workings/parts-table.tsx';
-import { WorkingLinks } from '#web/features/workings/working-links.tsx';
 import { formatDay, formatInstant } from '#web/lib/format.ts';
 import { useUnits } from '#web/lib/units.tsx';
 import { TitleBlock } from '#web/ui/figures.tsx';
@@ -102,11 +102,10 @@ export function Component() {
         <PartsTable boiler={boiler} />
       </Section>
       <Section title="Engineering checks">
-        <ChecksList checks={result.checks} />
-        <div className="mt-4">
-          <h3 className="mb-1">How these are worked out</h3>
-          <WorkingLinks boiler={boiler} />
-        </div>
+        <ChecksList
+          checks={result.checks}
+          aside={(check) => <CheckWorking boiler={boiler} check={check} />}
+        />
       </Section>
       <Section title="Will it drive my engine">
         <EngineMatches boiler={boiler} isMember={me !== null} />

@@ -66,7 +66,7 @@ export function Sizes({ facts }: { facts: BoilerFacts }) {
           : [{ label: 'Tubes', value: formatNumber(dimensions.tubeCount) }]),
         ...(dimensions.heatingSurfaceM2 === null
           ? []
-          : [{ label: 'Heating surface', value: `${formatNumber(dimensions.heatingSurfaceM2, 3)} m²` }]),
+          : [{ label: 'Heating surface', value: show('surface', dimensions.heatingSurfaceM2) }]),
         ...(dimensions.weightKg === null
           ? []
           : [{ label: 'Weight', value: show('mass', dimensions.weightKg) }]),

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { EngineeringCheck } from '#shared/surveys/result.ts';
 import type { Grade } from '#shared/surveys/record.ts';
 import { GradeMark } from '#web/ui/grade-mark.tsx';
@@ -11,7 +12,14 @@ const outcomes: Record<EngineeringCheck['status'], { mark: Grade; words: string 
 };
 
 /** The engineering checks, each with its outcome and the figures it went by; those that fail stand first. */
-export function ChecksList({ checks }: { checks: readonly EngineeringCheck[] }) {
+export function ChecksList({
+  checks,
+  aside,
+}: {
+  checks: readonly EngineeringCheck[];
+  /** Stands after what a check says. */
+  aside?: (check: EngineeringCheck) => ReactNode;
+}) {
   const sorted = checks.toSorted((a, b) => order.indexOf(a.status) - order.indexOf(b.status));
   return (
     <ul className="border-t border-rule">
@@ -30,6 +38,7 @@ export function ChecksList({ checks }: { checks: readonly EngineeringCheck[] }) 
             <span>
               {check.text}
               <FigureLine figures={check.figures} />
+              {aside?.(check)}
             </span>
           </li>
         );

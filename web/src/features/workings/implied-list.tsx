@@ -1,4 +1,4 @@
-import { quantityText } from '#shared/engineering/quantities.ts';
+import { figureText, fromKept, quantityText } from '#shared/engineering/quantities.ts';
 import type { Term } from '#shared/engineering/working.ts';
 import { impliedBy } from '#shared/workings/implied.ts';
 import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
@@ -8,8 +8,13 @@ import { WorkingLink } from './working-link.tsx';
 /** What follows from a boiler's figures, each leading to its working with the figures filled in. */
 export function ImpliedList({ boiler }: { boiler: KnownBoiler }) {
   const { units } = useUnits();
-  const text = (figures: readonly Term[]): string =>
-    figures.map(({ quantity, value }) => quantityText(quantity, units, value, 3)).join(' to ');
+  const text = ([first, last]: readonly Term[]): string => {
+    if (first === undefined) return 'Cannot say';
+    const one = quantityText(first.quantity, units, first.value, 3);
+    return last === undefined
+      ? one
+      : `${figureText(fromKept(first.quantity, units, first.value), 3)} to ${quantityText(last.quantity, units, last.value, 3)}`;
+  };
   return (
     <ul className="border-t border-rule">
       {impliedBy(boiler).map(({ label, figures, note, calculator, inputs }) => (
@@ -18,7 +23,7 @@ export function ImpliedList({ boiler }: { boiler: KnownBoiler }) {
             <span className="text-pencil">{label}</span>
             <span className="text-right font-medium">
               <WorkingLink calculator={calculator} inputs={inputs} of={label}>
-                {figures.length === 0 ? 'Cannot say' : text(figures)}
+                {text(figures)}
               </WorkingLink>
             </span>
           </div>
