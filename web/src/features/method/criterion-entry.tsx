@@ -1,16 +1,14 @@
 import { boilerTypes } from '#shared/boilers/boiler-types.ts';
 import type { BoilerTypeId } from '#shared/boilers/boiler-types.ts';
 import { firings, fittings } from '#shared/boilers/boiler.ts';
-import { remedies } from '#shared/surveys/record.ts';
-import { consequences, measureUnits, stopKinds } from '#shared/surveys/rubric/types.ts';
-import type { AppliesTo, Criterion, DefectSpec } from '#shared/surveys/rubric/types.ts';
-import { formatBand, formatNumber } from '#web/lib/format.ts';
-import { Disclosure } from '#web/ui/disclosure.tsx';
-import { GradeMark } from '#web/ui/grade-mark.tsx';
-import { Table } from '#web/ui/table.tsx';
-import type { Column } from '#web/ui/table.tsx';
+import type { AppliesTo, Criterion } from '#shared/surveys/rubric/types.ts';
+import { formatNumber } from '#web/lib/format.ts';
+import { DefectList } from './defect-list.tsx';
 
 const list = new Intl.ListFormat('en-GB', { type: 'disjunction' });
+
+/** Where an item stands on the Method page. */
+export const criterionAnchor = (criterionId: string): string => criterionId.replace('.', '-');
 
 /** When an item applies, in words; nothing where it always does. */
 function appliesText({ traits, fittings: fitted, firings: fired }: AppliesTo): string {
@@ -23,91 +21,87 @@ function appliesText({ traits, fittings: fitted, firings: fired }: AppliesTo): s
   return [where || (how && 'a boiler'), how].filter(Boolean).join(' ');
 }
 
-const hours = ({ allowance: { hoursLow, hoursHigh } }: DefectSpec): string =>
-  hoursLow === hoursHigh
-    ? formatNumber(hoursLow, 2)
-    : `${formatNumber(hoursLow, 2)}–${formatNumber(hoursHigh, 2)}`;
+const missingText = ({ ifNotFitted }: Criterion): string =>
+  ifNotFitted === 'nothing'
+    ? ''
+    : ` Where there is none at all, the verdict is ${ifNotFitted === 'do-not-steam' ? 'Do not steam' : 'Repair before steaming'}.`;
 
-const partsIn = (metal: 'copper' | 'steel') => (spec: DefectSpec) => {
-  const band = spec.allowance.parts[metal];
-  return formatBand(band.lowMinor, band.highMinor);
-};
+interface Props {
+  criterion: Criterion;
+  /** The type of boiler the reader asks about; null for every type. */
+  type: BoilerTypeId | null;
+}
 
-const defectCell = ({ label, stop }: DefectSpec) => (
-  <>
-    {label}
-    {stop !== null && <span className="block text-sm text-unfit">{stopKinds[stop]}: Do not steam</span>}
-  </>
-);
-
-const columns: readonly Column<DefectSpec>[] = [
-  { head: 'Defect', cell: defectCell },
-  { head: 'Usually', cell: ({ grade }) => <GradeMark grade={grade} size={16} hasLabel /> },
-  { head: 'Bears on', cell: ({ consequence }) => consequences[consequence] },
-  { head: 'Remedy', cell: ({ remedy }) => remedies[remedy] },
-  { head: 'Hours', isNumber: true, cell: hours },
-  { head: 'Parts, copper', isNumber: true, cell: partsIn('copper') },
-  { head: 'Parts, steel', isNumber: true, cell: partsIn('steel') },
-];
-
-/** One item of the method: what to look for, how it may be examined and what each way is worth, and its defects. */
-export function CriterionEntry({ criterion }: { criterion: Criterion }) {
-  const { number, title, weight, safetyCritical, lookFor, ways, measurements, defects } = criterion;
+/** One item of the method: what to look for, and behind a press its defects, ways, measurements and photographs. */
+export function CriterionEntry({ criterion, type }: Props) {
+  const { number, title, weight, safetyCritical, lookFor, defects } = criterion;
+  const special = type === null ? undefined : lookFor.byType[type];
   const applies = appliesText(criterion.appliesTo);
+  const count = `${String(defects.length)} defects`;
   return (
-    <article id={criterion.id.replace('.', '-')} className="border-b border-rule py-4">
-      <div className="flex flex-wrap items-baseline justify-between gap-x-6">
-        <h3>
-          <span className="mr-3 inline-block min-w-6 font-normal text-pencil">{number}</span>
-          {title}
-        </h3>
-        <span className="text-pencil">
-          Weight {weight}
-          {safetyCritical && ' · bears on the verdict'}
-        </span>
-      </div>
-      <div className="mt-1 grid gap-2 sm:pl-9">
-        <p className="max-w-prose">{lookFor.line}</p>
-        {applies !== '' && <p className="text-sm text-pencil">Applies to {applies}.</p>}
-        {criterion.ifNotFitted !== 'nothing' && (
-          <p className="text-sm text-pencil">
-            Where there is none at all, the verdict is{' '}
-            {criterion.ifNotFitted === 'do-not-steam' ? 'Do not steam' : 'Repair before steaming'}.
+    <article
+      id={criterionAnchor(criterion.id)}
+      className="grid grid-cols-[2rem_minmax(0,1fr)] border-b border-rule pt-4 pb-1"
+    >
+      <span className="text-lg leading-6 text-pencil">{number}</span>
+      <div>
+        <div className="flex flex-wrap items-baseline justify-between gap-x-6">
+          <h3>{title}</h3>
+          <span className="text-sm text-pencil">
+            Weight {weight}
+            {safetyCritical && ', safety-critical'}
+          </span>
+        </div>
+        <p className="mt-1 max-w-prose">{lookFor.line}</p>
+        {special !== undefined && <p className="mt-1 max-w-prose font-medium">{special}</p>}
+        {(applies !== '' || criterion.ifNotFitted !== 'nothing') && (
+          <p className="mt-1 max-w-prose text-sm text-pencil">
+            {applies !== '' && `Applies to ${applies}.`}
+            {missingText(criterion)}
           </p>
         )}
-        <p className="text-sm text-pencil">
-          Ways and what each is worth alone:{' '}
-          {ways.map((way) => `${way.label.toLowerCase()} ${formatNumber(way.strength, 2)}`).join(', ')}.
-        </p>
-        <Disclosure summary="Defects, measurements and photographs">
-          <div className="grid gap-4">
-            <ul className="list-disc pl-5">
-              {Object.entries(lookFor.byType).map(([type, line]) => (
-                <li key={type}>
-                  {boilerTypes[type as BoilerTypeId].label}: {line}
-                </li>
-              ))}
-            </ul>
-            <Table
-              caption={`Defects of ${title.toLowerCase()}`}
-              isCaptionHidden
-              rows={defects}
-              keyOf={({ code }) => code}
-              columns={columns}
-            />
-            {measurements.length > 0 && (
-              <p>
-                Measured:{' '}
-                {measurements
-                  .map(({ label, unit }) => `${label.toLowerCase()} (${measureUnits[unit]})`)
-                  .join('; ')}
-                .
-              </p>
-            )}
-            <p>Photographs wanted: {criterion.photosWanted.join('; ').toLowerCase()}.</p>
+        <details>
+          <summary className="min-h-11 py-2.5 font-medium marker:text-copper">
+            {count}, and how it is examined
+            <span className="sr-only">: {title}</span>
+          </summary>
+          <div className="grid gap-4 pb-4">
+            <DefectList defects={defects} label={`Defects of ${title.toLowerCase()}`} />
+            <HowExamined criterion={criterion} isEveryType={type === null} />
           </div>
-        </Disclosure>
+        </details>
       </div>
     </article>
+  );
+}
+
+function HowExamined({ criterion, isEveryType }: { criterion: Criterion; isEveryType: boolean }) {
+  const { ways, measurements, photosWanted, lookFor } = criterion;
+  const rows: readonly (readonly [label: string, text: string])[] = [
+    ...(isEveryType
+      ? Object.entries(lookFor.byType).map(
+          ([type, line]) => [boilerTypes[type as BoilerTypeId].label, line] as const,
+        )
+      : []),
+    [
+      'How surely each way shows it, alone',
+      ways
+        .map(({ label, strength }) => `${label.toLowerCase()} ${formatNumber(strength * 100)} %`)
+        .join(', '),
+    ],
+    ['Measured', measurements.map(({ label }) => label.toLowerCase()).join('; ')],
+    ['Photographs wanted', photosWanted.join('; ').toLowerCase()],
+  ];
+  return (
+    <dl className="grid max-w-prose gap-2">
+      {rows
+        .filter(([, text]) => text !== '')
+        .map(([label, text]) => (
+          <div key={label}>
+            <dt className="text-label text-pencil">{label}</dt>
+            <dd className="text-[0.9375rem] leading-6 first-letter:uppercase">{text}</dd>
+          </div>
+        ))}
+    </dl>
   );
 }

@@ -5,21 +5,21 @@ import { criteriaFor, rubricOf } from '#shared/surveys/rubric/index.ts';
 import type { Criterion, DefectSpec } from '#shared/surveys/rubric/types.ts';
 
 export const hydraulicChoices = {
-  held: 'Made, and it held',
-  fell: 'Made, and the pressure fell',
-  leak: 'Made, and a seam wept',
+  held: 'Made: it held',
+  fell: 'Made: pressure fell',
+  leak: 'Made: a seam wept',
   none: 'Not made',
 } as const;
 export type HydraulicChoice = keyof typeof hydraulicChoices;
 
 export const steamChoices = {
-  made: 'Made, all as it should be',
-  late: 'Made, and the valve lifted late',
+  made: 'Made: all in order',
+  late: 'Made: valve lifts late',
   none: 'Not made',
 } as const;
 export type SteamChoice = keyof typeof steamChoices;
 
-export const carbonMonoxideChoices = { low: 'Low, 6 ppm', high: 'High, 140 ppm' } as const;
+export const carbonMonoxideChoices = { low: 'Low: 6 ppm', high: 'High: 140 ppm' } as const;
 export type CarbonMonoxideChoice = keyof typeof carbonMonoxideChoices;
 
 /** What the reader has changed in the example. */

@@ -23,7 +23,7 @@ export function VerdictRules({ method }: { method: MethodData }) {
                     className="grid gap-x-8 border-b border-rule py-2 md:grid-cols-[minmax(0,1fr)_minmax(0,1fr)]"
                   >
                     <span>{rule.title}</span>
-                    <span className="text-pencil">{rule.why}</span>
+                    <span className="text-sm leading-6 text-pencil">{rule.why}</span>
                   </li>
                 ))}
               </ul>

@@ -35,9 +35,9 @@ function AgreementWith({ other }: { other: ReportAgreement }) {
         <p>
           <VerdictMark verdict={other.verdict} />
         </p>
+        {agreement.common > 1 && <p>{alikeText(agreement)}</p>}
         {kappa !== null && <Figure label="Agreement, weighted kappa" value={kappa} of="of 1" />}
         <p>{meaningOf(agreement)}</p>
-        {agreement.common > 1 && <p>{alikeText(agreement)}</p>}
         {kappa !== null && (
           <p className="text-sm leading-5 text-pencil">
             1 is full agreement, 0 what chance alone would give. Two grades apart counts four times as much as
