@@ -1,5 +1,5 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
-import { lazy, Suspense } from 'react';
+import { lazy, Suspense, useEffect } from 'react';
 import { Link, useSearchParams } from 'react-router-dom';
 import { sitePaths } from '#shared/site-paths.ts';
 import type { MethodData } from '#shared/surveys/method.ts';
@@ -18,10 +18,18 @@ import { Page, Section } from '#web/ui/page.tsx';
 // Scoring is fetched after the page is there to read.
 const TryIt = lazy(async () => ({ default: (await import('#web/features/method/try-it.tsx')).TryIt }));
 
+/** Goes to the part of the page that the address names, which was not there yet when the browser looked for it. */
+function useArriveAtPart() {
+  useEffect(() => {
+    document.getElementById(window.location.hash.slice(1))?.scrollIntoView();
+  }, []);
+}
+
 /** The published method, from the very data that reports are scored by. */
 export function Component() {
   const [search] = useSearchParams();
   const { data: method } = useSuspenseQuery(methodQueries.version(search.get('version')));
+  useArriveAtPart();
   const { rubric, current } = method;
   const criteria = rubric.sections.reduce((sum, { criteria: own }) => sum + own.length, 0);
   return (
