@@ -39,16 +39,16 @@ function CopyAddress() {
   );
 }
 
-/** The answer kept in sight on a phone while figures further up are changed. */
+/** The answer kept in sight on a phone while figures are changed. What it says is said aloud where the answer stands. */
 function AnswerBar({ label, text }: { label: string; text: string }) {
   return (
-    <a
-      href="#answer"
-      className="no-print sticky bottom-0 z-10 -mx-4 flex items-baseline justify-between gap-4 border-t border-ink bg-sheet px-4 py-3 sm:-mx-6 sm:px-6 lg:hidden"
+    <div
+      aria-hidden="true"
+      className="no-print pointer-events-none sticky bottom-0 z-10 -mx-4 flex items-baseline justify-between gap-4 border-t border-ink bg-sheet px-4 py-3 sm:-mx-6 sm:px-6 lg:hidden"
     >
       <span className="text-pencil">{label}</span>
       <span className="text-lg font-medium">{text}</span>
-    </a>
+    </div>
   );
 }
 
