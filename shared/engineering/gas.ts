@@ -176,20 +176,6 @@ export const gasHeat = (gas: GasId, gasGPerH: number): Line =>
     holds: 'Gas burnt whole',
   });
 
-/** Gas that a heat calls for. */
-export const gasForHeat = (gas: GasId, heatKw: number): Line =>
-  work({
-    result: ['m', 'Gas wanted', 'fuelRate'],
-    formula: '{H} / {N}',
-    terms: {
-      H: ['Heat of the flame', 'power', heatKw],
-      N: [`Net heating value of ${gases[gas].label.toLowerCase()}`, 'heatingValue', gases[gas].netMjPerKg],
-    },
-    compute: ({ H, N }) => (H / N) * 3_600,
-    source: 'heating-values',
-    holds: 'Gas burnt whole',
-  });
-
 /** Oxygen in air by volume. */
 const oxygenShare = 0.209_5;
 

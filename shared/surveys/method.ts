@@ -1,4 +1,8 @@
 import { z } from 'zod';
+import { fireMarginK } from '../engineering/metal.ts';
+import { seamEfficiencies } from '../engineering/shell.ts';
+import { sources, surenesses } from '../engineering/sources.ts';
+import { testProfileIds, testProfiles } from '../engineering/test-profiles.ts';
 import { limits } from './limits.ts';
 import { grades, remedies } from './record.ts';
 import { allowanceGroups } from './result.ts';
@@ -54,6 +58,19 @@ export const methodDataSchema = z.strictObject({
       value: z.number(),
       unit: z.string(),
       source: z.string(),
+    }),
+  ),
+  /** How a hydraulic test may be made; the surveyor picks one and the report says which. */
+  testProfiles: z.array(
+    z.strictObject({
+      id: z.string(),
+      label: z.string(),
+      firstPercent: z.number(),
+      repeatPercent: z.number(),
+      holdMinutes: z.number(),
+      fallPercent: z.number(),
+      source: z.string(),
+      sureness: z.string(),
     }),
   ),
   /** How the figures are worked out and rounded, a sentence each. */
@@ -204,6 +221,22 @@ export function methodData(version: string = rubricVersion): MethodData {
         'common practice',
       ),
       limitRow(
+        'fire-margin',
+        'Metal in the fire is taken hotter than the steam by',
+        fireMarginK,
+        '°C',
+        `${sources['metal-margin'].title}; from memory`,
+      ),
+      ...Object.entries(seamEfficiencies).map(([id, { label, efficiency }]) =>
+        limitRow(
+          `seam-${id}`,
+          `${label}: carries of its plate`,
+          efficiency * 100,
+          '%',
+          sources['seam-efficiency'].title,
+        ),
+      ),
+      limitRow(
         'carbon-monoxide',
         'Carbon monoxide at the operator, under',
         limits.coShortTermPpm,
@@ -246,6 +279,10 @@ export function methodData(version: string = rubricVersion): MethodData {
         ours,
       ),
     ],
+    testProfiles: testProfileIds.map((id) => {
+      const { sureness, ...profile } = testProfiles[id];
+      return { id, ...profile, sureness: surenesses[sureness] };
+    }),
     arithmetic: [
       'Condition is the mean of the grade points over what was examined, each item by its weight, to the nearest whole number, halves up. It is a dash where less than a third of the applicable weight was examined.',
       'Each way of examining has a strength: how surely it shows the item by itself. In several ways, what each leaves unknown is multiplied: half by eye and a quarter by measuring leave an eighth.',

@@ -40,6 +40,21 @@ const jointOfConstruction: Readonly<Record<ConstructionId, JointMetalId>> = {
   unknown: 'silver-55',
 };
 
+const jointOfFound: Readonly<Record<string, JointMetalId>> = {
+  'soft-solder': 'tin-lead',
+  'rivets-soft': 'tin-lead',
+  'silver-solder': 'silver-55',
+  bronze: 'silver-55',
+  weld: 'welded',
+  rivets: 'riveted',
+};
+
+/** What its joints are made with: as a surveyor found it, else as the seller says. */
+export function jointOfBoiler({ facts, items }: KnownBoiler): JointMetalId {
+  const found = valuesOf(items, 'shell.joints', 'jointMaterial')[0];
+  return jointOfFound[String(found)] ?? jointOfConstruction[facts.construction];
+}
+
 function supportInputs(support: NonNullable<PartsInput['plates']>['support']): Inputs {
   return support.by === 'stays'
     ? { plates: 'stays', pitchMm: support.pitchMm }
@@ -47,7 +62,8 @@ function supportInputs(support: NonNullable<PartsInput['plates']>['support']): I
 }
 
 /** What the parts stand, with this boiler's sizes. */
-export function partsInputs({ facts, items }: KnownBoiler): Inputs {
+export function partsInputs(boiler: KnownBoiler): Inputs {
+  const { facts, items } = boiler;
   const { barrel, plates, flue, tubes, stays, material, workingPa } = partsInputOf(facts, items);
   return filled('pressure-by-parts', {
     workingPa,
@@ -69,15 +85,15 @@ export function partsInputs({ facts, items }: KnownBoiler): Inputs {
     stayMm: stays?.diameterMm ?? null,
     stayPitchMm: stays?.pitchMm ?? null,
     stayTpi: stays?.tpi ?? null,
-    jointMetal: jointOfConstruction[facts.construction],
+    jointMetal: jointOfBoiler(boiler),
   });
 }
 
 /** What its joints are made with. */
-export const jointsInputs = ({ facts }: KnownBoiler): Inputs =>
+export const jointsInputs = (boiler: KnownBoiler): Inputs =>
   filled('joints', {
-    workingPa: facts.workingPressurePa,
-    jointMetal: jointOfConstruction[facts.construction],
+    workingPa: boiler.facts.workingPressurePa,
+    jointMetal: jointOfBoiler(boiler),
   });
 
 /** Steam at its working pressure. */

@@ -1,16 +1,16 @@
 import { materials } from '../../boilers/boiler.ts';
-import { isSoftJoint, jointMetals, jointOf } from '../../engineering/joints.ts';
-import type { JointMetalId } from '../../engineering/joints.ts';
+import { jointMetals } from '../../engineering/joints.ts';
 import { fireMarginK } from '../../engineering/metal.ts';
 import { partTitles, pressureByParts, wallNeeded } from '../../engineering/parts.ts';
 import type { PartOutcome, PartsInput } from '../../engineering/parts.ts';
 import { stayEndings } from '../../engineering/plates.ts';
-import { seamEfficiencies } from '../../engineering/shell.ts';
+import { barrelThickness, seamEfficiencies } from '../../engineering/shell.ts';
 import { listText, pressureText } from '../../surveys/words.ts';
-import { calculator, curve, spread } from '../calculator.ts';
+import { calculator, curve, spread, steps } from '../calculator.ts';
 import type { Mistake, Plot, Steps } from '../calculator.ts';
 import { choice, figure, labelsOf, unknownFigure } from '../field.ts';
 import type { InputOf } from '../field.ts';
+import { jointSays } from '../joint-words.ts';
 import { acrossRange, wallRange, workingPressure } from '../ranges.ts';
 import { lengthText } from '../say.ts';
 
@@ -185,17 +185,6 @@ const barrelStandsAt = (input: Input, wallMm: number): number | null =>
     ? null
     : (pressureByParts(partsInput(input, wallMm)).parts[0]?.standsPa ?? null);
 
-function jointSays({ jointMetal, workingPa }: { jointMetal: JointMetalId; workingPa: number }): string {
-  if (isSoftJoint(jointMetal))
-    return 'Soft solder in a pressure joint is a stop: it softens not far above the heat of the steam, and creeps below it.';
-  const { ratedPa } = jointOf(jointMetal);
-  if (ratedPa === null)
-    return 'Joints of this kind have no published rating here: the seam efficiency stands for them.';
-  return workingPa > ratedPa
-    ? `The published rating of brazed tube joints in saturated steam ends at ${pressureText(ratedPa)}: above it there is no figure here.`
-    : `Brazed joints are rated to ${pressureText(ratedPa)} in saturated steam by a published table.`;
-}
-
 const stepsOf = ({ title, lines, refusal, governing }: PartOutcome): Steps => ({
   title: governing === null ? title : `${title}: ${pressureText(governing.result.value)}`,
   lines,
@@ -214,6 +203,19 @@ function metalSteps(parts: readonly PartOutcome[]): Steps[] {
     lines: alike[0]?.metal ?? [],
     refusals: [],
   }));
+}
+
+/** The wall that the shell formula alone asks for; the older rule may ask for more. */
+function wallStep(input: Input, [barrel]: readonly PartOutcome[]): Steps[] {
+  const stress = barrel?.metal.at(-1);
+  if (stress === undefined) return [];
+  const needed = barrelThickness({
+    insideRadiusMm: input.barrelOutsideMm / 2 - (input.barrelWallMm ?? 0),
+    pressurePa: input.workingPa,
+    stressPa: stress.result.value,
+    joint: seamEfficiencies[input.seam].efficiency,
+  });
+  return [steps('Wall the barrel needs, by the shell formula', needed)];
 }
 
 /** What each pressure part stands, and which governs. */
@@ -259,7 +261,7 @@ export const pressureByPartsCalculator = calculator({
         ),
       ],
       says,
-      steps: [...metalSteps(parts), ...parts.map(stepsOf)],
+      steps: [...metalSteps(parts), ...parts.map(stepsOf), ...wallStep(input, parts)],
     };
   },
   plot: (input): Plot => {

@@ -95,7 +95,7 @@ export function Layout() {
       <main id="main" ref={main} tabIndex={-1} className="flex-1 outline-none">
         <Suspense
           fallback={
-            <div className="mx-auto min-h-[70dvh] max-w-[76rem] px-4 sm:px-6">
+            <div className="mx-auto min-h-dvh max-w-[76rem] px-4 sm:px-6">
               <Loading />
             </div>
           }

@@ -7,6 +7,7 @@ import { Criteria, weightOf } from '#web/features/method/criteria.tsx';
 import { GradesAndFigures } from '#web/features/method/grades-and-figures.tsx';
 import { LimitsList } from '#web/features/method/limits-list.tsx';
 import { methodQueries } from '#web/features/method/queries.ts';
+import { TestProfiles } from '#web/features/method/test-profiles.tsx';
 import { VerdictRules } from '#web/features/method/verdict-rules.tsx';
 import { Versions } from '#web/features/method/versions.tsx';
 import { ResultSummary } from '#web/features/reports/result-summary.tsx';
@@ -83,6 +84,13 @@ export function Component() {
       <Section title="Limits and sources" id="limits">
         <LimitsList limits={method.limits} />
       </Section>
+      <Section title="Test profiles" id="profiles">
+        <p className="mb-4 max-w-prose">
+          The surveyor picks the profile that the local code asks for, and the report says which. The local
+          code governs.
+        </p>
+        <TestProfiles profiles={method.testProfiles} />
+      </Section>
       <Section title="Check our scoring" id="check-us">
         <div className="grid max-w-prose gap-3">
           <p>
@@ -119,6 +127,7 @@ function Introduction({ method }: { method: MethodData }) {
     ['try', 'Try it'],
     ...method.rubric.sections.map(({ id, title, criteria }) => [id, title, weightOf(criteria)] as const),
     ['limits', 'Limits and sources'],
+    ['profiles', 'Test profiles'],
     ['check-us', 'Check our scoring'],
     ['versions', 'Versions'],
   ];

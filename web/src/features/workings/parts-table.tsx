@@ -1,7 +1,8 @@
 import { partsOf, weakestOf } from '#shared/surveys/parts.ts';
 import type { BoilerPart } from '#shared/surveys/parts.ts';
-import { partsInputs } from '#shared/workings/from-boiler.ts';
+import { jointOfBoiler, partsInputs } from '#shared/workings/from-boiler.ts';
 import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
+import { jointSays } from '#shared/workings/joint-words.ts';
 import { useUnits } from '#web/lib/units.tsx';
 import { Table } from '#web/ui/table.tsx';
 import { WorkingLink } from './working-link.tsx';
@@ -44,6 +45,7 @@ export function PartsTable({ boiler }: { boiler: KnownBoiler }) {
           { head: 'By calculation', cell: stands },
         ]}
       />
+      <p>Joints: {jointSays({ jointMetal: jointOfBoiler(boiler), workingPa: facts.workingPressurePa })}</p>
       <p className="text-sm text-pencil">
         For {show('pressure', facts.workingPressurePa)} claimed. A calculation is no test: it speaks of
         figures, not of joints.{' '}
