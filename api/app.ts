@@ -21,6 +21,7 @@ import { placeRoutes } from './features/places/routes.ts';
 import { reportRoutes } from './features/reports/routes.ts';
 import { paymentNoticeRoutes } from './features/settlements/routes.ts';
 import { surveyOrderRoutes } from './features/survey-orders/routes.ts';
+import { printedReportRoutes } from './features/printed-reports/routes.ts';
 import { surveyorRoutes } from './features/surveyors/routes.ts';
 import { perMinute, sameOriginOnly, securityHeaders } from './http/guards.ts';
 import { healthRoutes } from './http/health.ts';
@@ -109,7 +110,8 @@ export function createApp(deps: Deps): Express {
   );
   app.use('/media', attachCtx(deps));
   app.use(accountRoutes(deps.letters), placeRoutes, listingRoutes, photoRoutes(deps.uploadsDir));
-  app.use(examinationRoutes, reportRoutes, methodRoutes(deps.rateFactor), workingsRoutes(deps.rateFactor));
+  app.use(examinationRoutes, reportRoutes, printedReportRoutes(deps.rateFactor));
+  app.use(methodRoutes(deps.rateFactor), workingsRoutes(deps.rateFactor));
   app.use(surveyorRoutes, surveyOrderRoutes, engineRoutes, deskRoutes, officeRoutes);
   app.use(openApiRoute(publicUrl));
   app.use('/api', nothingHere);

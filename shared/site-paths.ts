@@ -27,6 +27,8 @@ export const sitePaths = {
   order: (orderId: string): string => `/surveys/${orderId}`,
   examination: (orderId: string): string => `/surveys/${orderId}/examine`,
   report: (reportId: string): string => `/reports/${reportId}`,
+  printedReport: (reportId: string, paper: 'a4' | 'letter', units: 'imperial' | 'metric'): string =>
+    `/api/reports/${reportId}/pdf?paper=${paper}&units=${units}`,
   officeOrders: '/office',
   officeMoney: '/office/money',
   officeMembers: '/office/members',

@@ -1,4 +1,5 @@
 import type { Ctx } from '../ctx.ts';
+import * as printedReports from '../features/printed-reports/service.ts';
 import * as settlements from '../features/settlements/service.ts';
 import * as surveyOrders from '../features/survey-orders/service.ts';
 import type { Job } from './jobs.ts';
@@ -7,13 +8,15 @@ import type { Job } from './jobs.ts';
 export async function handleJob(ctx: Ctx, job: Job): Promise<void> {
   switch (job.kind) {
     case 'send-letter': {
-      const { attachments = [], ...letter } = job.data;
+      const { attachments = [], withReportOfOrder, ...letter } = job.data;
+      const report =
+        withReportOfOrder === undefined ? [] : await printedReports.printForLetter(ctx, withReportOfOrder);
       await ctx.mail.send({
         ...letter,
-        attachments: attachments.map(({ base64, ...rest }) => ({
-          ...rest,
-          content: Buffer.from(base64, 'base64'),
-        })),
+        attachments: [
+          ...attachments.map(({ base64, ...rest }) => ({ ...rest, content: Buffer.from(base64, 'base64') })),
+          ...report,
+        ],
       });
       return;
     }

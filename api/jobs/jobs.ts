@@ -2,6 +2,8 @@ export interface LetterJob {
   to: string;
   subject: string;
   text: string;
+  /** The report of this order goes with it, on paper. */
+  withReportOfOrder?: string;
   attachments?: { filename: string; contentType: string; base64: string }[];
 }
 

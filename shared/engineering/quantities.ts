@@ -216,3 +216,20 @@ export function quantityText(
   const isTight = unit === '' || unit === '°';
   return isTight ? `${text}${unit}` : `${text} ${unit}`;
 }
+
+/** Places after the point where a list wants its figures alike; the rest go by significant figures. */
+const listPlaces: Partial<Record<Quantity, Record<UnitSystem, number>>> = {
+  pressure: { imperial: 0, metric: 2 },
+  length: { imperial: 3, metric: 1 },
+  volume: { imperial: 2, metric: 2 },
+  mass: { imperial: 1, metric: 1 },
+  distance: { imperial: 0, metric: 0 },
+};
+
+/** A kept figure as it stands in a list of its like, with its unit. */
+export function listedText(quantity: Quantity, units: UnitSystem, value: number): string {
+  const digits = listPlaces[quantity]?.[units];
+  if (digits === undefined || !Number.isFinite(value)) return quantityText(quantity, units, value);
+  const figure = new Intl.NumberFormat(locale, { maximumFractionDigits: digits });
+  return `${figure.format(fromKept(quantity, units, value))} ${unitOf(quantity, units)}`;
+}

@@ -236,6 +236,7 @@ const table: Record<string, Row> = {
     surveyorOfIt,
   ],
   acceptReport: [({ reviewed }) => order(reviewed, 'post', '/accept-report', {}), buyerAlone],
+  printReport: [({ reviewed, filed }) => of(reviewed, 'get', `/api/reports/${filed.id}/pdf`), everyone],
   getReport: [({ reviewed, filed }) => of(reviewed, 'get', `/api/reports/${filed.id}`), everyone],
   getReportAgreements: [
     ({ reviewed, filed }) => of(reviewed, 'get', `/api/reports/${filed.id}/agreements`),

@@ -77,6 +77,16 @@ const fromRow = ({ report, order, listing, surveyorName, surveyorNumber }: Row):
   checkCode: report.checkCode,
 });
 
+export async function findReportIdOfOrder(db: Db, orderId: string): Promise<string | undefined> {
+  const [row] = await db
+    .select({ id: reports.id })
+    .from(reports)
+    .where(eq(reports.orderId, orderId))
+    .orderBy(desc(reports.filedAt))
+    .limit(1);
+  return row?.id;
+}
+
 export async function findReport(db: Db, id: string): Promise<StoredReport | undefined> {
   const [row] = await find(db).where(eq(reports.id, id));
   return row && fromRow(row);
@@ -89,6 +99,8 @@ export async function findReportByCode(db: Db, checkCode: string): Promise<Store
 
 /** Every report filed on a boiler, newest first. */
 export async function listReportsOfListing(db: Db, listingId: string): Promise<StoredReport[]> {
-  const rows = await find(db).where(eq(reports.listingId, listingId)).orderBy(desc(reports.filedAt), reports.id);
+  const rows = await find(db)
+    .where(eq(reports.listingId, listingId))
+    .orderBy(desc(reports.filedAt), reports.id);
   return rows.map(fromRow);
 }

@@ -78,6 +78,10 @@ export async function getReport(ctx: Ctx, id: string): Promise<Report> {
   };
 }
 
+/** The report filed for an order; undefined while there is none. */
+export const findReportIdOfOrder = (ctx: Ctx, orderId: string): Promise<string | undefined> =>
+  repo.findReportIdOfOrder(ctx.db, orderId);
+
 /** The other reports on the same boiler, each set against this one. @throws Problem not-found. */
 export async function getReportAgreements(ctx: Ctx, id: string): Promise<{ items: ReportAgreement[] }> {
   const stored = await repo.findReport(ctx.db, id);

@@ -171,16 +171,24 @@ export function lettersOf(moved: Moved, by: Part | 'system'): LetterJob[] {
         'The surveyor began the examination and could not finish it.',
         ['buyer', 'seller', 'surveyor'],
       );
-    case 'fileReport':
+    case 'fileReport': {
+      const onPaper = { withReportOfOrder: order.id };
       return [
-        letterTo('buyer', moved, 'The report is in', [
-          `The surveyor has filed the report. Read it before ${timeText(order.dueAt ?? order.movedAt)}: then the fee is released, or earlier if you accept it.`,
-          'It speaks of the day of examination only and is no certificate of safety.',
-        ]),
-        letterTo('seller', moved, 'The report is in', [
-          'The surveyor has filed the report on your boiler. It is attached to your listing.',
-        ]),
+        {
+          ...letterTo('buyer', moved, 'The report is in', [
+            `The surveyor has filed the report; it comes with this letter. Read it before ${timeText(order.dueAt ?? order.movedAt)}: then the fee is released, or earlier if you accept it.`,
+            'It speaks of the day of examination only and is no certificate of safety.',
+          ]),
+          ...onPaper,
+        },
+        {
+          ...letterTo('seller', moved, 'The report is in', [
+            'The surveyor has filed the report on your boiler; it comes with this letter. It is attached to your listing.',
+          ]),
+          ...onPaper,
+        },
       ];
+    }
     case 'release':
       return [
         letterTo('surveyor', moved, 'Your fee has been sent', [

@@ -1,9 +1,7 @@
-import type { Money } from '#shared/money.ts';
 import type { Instant } from '#shared/time.ts';
 
 /** An amount as a letter says it. */
-export const moneyText = ({ minor, currency }: Money): string =>
-  new Intl.NumberFormat('en-GB', { style: 'currency', currency }).format(minor / 100);
+export { formatSum as moneyText } from '#shared/money-words.ts';
 
 const clock = new Intl.DateTimeFormat('en-GB', {
   weekday: 'long',

@@ -1,26 +1,10 @@
 import type { Units } from '#shared/accounts/contract.ts';
-import { fromKept, quantityText, toKept, unitOf } from '#shared/engineering/quantities.ts';
+import { fromKept, listedText, toKept, unitOf } from '#shared/engineering/quantities.ts';
 import type { Quantity } from '#shared/engineering/quantities.ts';
-import type { Money } from '#shared/money.ts';
 
 const locale = 'en-GB';
 
-export const formatMoney = ({ minor, currency }: Money): string =>
-  new Intl.NumberFormat(locale, {
-    style: 'currency',
-    currency,
-    ...(minor % 100 === 0 ? { minimumFractionDigits: 0 } : {}),
-  }).format(minor / 100);
-
-/** Money in a column that adds up: pence always, so that the figures stand under one another. */
-export const formatSum = ({ minor, currency }: Money): string =>
-  new Intl.NumberFormat(locale, { style: 'currency', currency }).format(minor / 100);
-
-export const formatPence = (minor: number): string => formatMoney({ minor, currency: 'GBP' });
-
-/** A band of money; one figure where both ends are the same. */
-export const formatBand = (lowMinor: number, highMinor: number): string =>
-  lowMinor === highMinor ? formatPence(lowMinor) : `${formatPence(lowMinor)}–${formatPence(highMinor)}`;
+export { formatBand, formatMoney, formatPence, formatSum } from '#shared/money-words.ts';
 
 export const formatNumber = (value: number, digits = 0): string =>
   new Intl.NumberFormat(locale, { maximumFractionDigits: digits }).format(value);
@@ -62,23 +46,9 @@ export { unitOf };
 export const fromSi = fromKept;
 export const toSi = toKept;
 
-/** Places after the point where a list of figures wants them alike; the rest go by significant figures. */
-const places: Partial<Record<Quantity, Record<Units, number>>> = {
-  pressure: { imperial: 0, metric: 2 },
-  length: { imperial: 3, metric: 1 },
-  volume: { imperial: 2, metric: 2 },
-  mass: { imperial: 1, metric: 1 },
-  distance: { imperial: 0, metric: 0 },
-};
-
 /** A figure in the reader's units with its unit; a dash for none. */
-export function formatQuantity(quantity: Quantity, units: Units, value: number | null | undefined): string {
-  if (value === null || value === undefined || !Number.isFinite(value)) return '–';
-  const digits = places[quantity]?.[units];
-  return digits === undefined
-    ? quantityText(quantity, units, value)
-    : `${formatNumber(fromKept(quantity, units, value), digits)} ${unitOf(quantity, units)}`;
-}
+export const formatQuantity = (quantity: Quantity, units: Units, value: number | null | undefined): string =>
+  value === null || value === undefined ? '–' : listedText(quantity, units, value);
 
 export const formatBytes = (bytes: number): string =>
   bytes < 1_000_000

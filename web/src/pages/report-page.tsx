@@ -10,6 +10,7 @@ import { ChecksList } from '#web/features/reports/checks-list.tsx';
 import { foundId } from '#web/features/reports/found-item.tsx';
 import { FoundList } from '#web/features/reports/found-list.tsx';
 import { InstrumentsTable } from '#web/features/reports/instruments-table.tsx';
+import { PrintLinks } from '#web/features/reports/print-links.tsx';
 import { PutRight } from '#web/features/reports/put-right.tsx';
 import { reportQueries } from '#web/features/reports/queries.ts';
 import { ResultSummary } from '#web/features/reports/result-summary.tsx';
@@ -137,6 +138,9 @@ export function Component() {
           </li>
         </ul>
       </Section>
+      <div className="mt-8">
+        <PrintLinks reportId={id} />
+      </div>
       <TitleBlock
         items={[
           { label: 'Boiler', value: listing.title },

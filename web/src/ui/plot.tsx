@@ -20,6 +20,10 @@ interface Props {
   marks?: readonly { label: string; x: number; y: number }[];
   /** Heights to compare with. */
   levels?: readonly { label: string; y: number }[];
+  /** A stretch of the x axis to look at. */
+  stretch?: { label: string; from: number; to: number };
+  /** The points were read, not worked out: each is shown, and each is in the table. */
+  isRead?: boolean;
 }
 
 const margin = { top: 14, right: 14, bottom: 46, left: 58 };
@@ -28,9 +32,9 @@ const dashes = ['', '7 4', '2 4'];
 const named = ({ label, unit }: Axis): string => (unit === '' ? label : `${label}, ${unit}`);
 
 /** Rows of a table that says what the plot shows: every curve at the same dozen places. */
-function rowsOf(series: Props['series']): { x: number; ys: (number | null)[] }[] {
+function rowsOf(series: Props['series'], isRead: boolean): { x: number; ys: (number | null)[] }[] {
   const first = series[0]?.points ?? [];
-  const step = Math.max(1, Math.round(first.length / 12));
+  const step = isRead ? 1 : Math.max(1, Math.round(first.length / 12));
   return first
     .filter((_, index) => index % step === 0 || index === first.length - 1)
     .map(([x]) => ({
@@ -43,7 +47,7 @@ function rowsOf(series: Props['series']): { x: number; ys: (number | null)[] }[]
 const figure = (value: number): string => formatNumber(Number(value.toPrecision(4)), 4);
 
 /** A plot drawn like one on a sheet, with the same figures in a table below for those who cannot see it. */
-export function Plot({ title, x, y, series, marks = [], levels = [] }: Props) {
+export function Plot({ title, x, y, series, marks = [], levels = [], stretch, isRead = false }: Props) {
   const [box, width] = useWidth<HTMLDivElement>(640);
   const id = useId();
   const height = Math.round(Math.min(420, Math.max(260, width * 0.55)));
@@ -108,6 +112,25 @@ export function Plot({ title, x, y, series, marks = [], levels = [] }: Props) {
               {named(y)}
             </text>
           </g>
+          {stretch && (
+            <rect
+              x={across(stretch.from)}
+              y={margin.top}
+              width={Math.max(0, across(stretch.to) - across(stretch.from))}
+              height={bottom - margin.top}
+              className="fill-wash"
+            />
+          )}
+          {stretch && (
+            <text
+              x={(across(stretch.from) + across(stretch.to)) / 2}
+              y={bottom - 8}
+              textAnchor="middle"
+              className="fill-ink text-[0.8125rem]"
+            >
+              {stretch.label}
+            </text>
+          )}
           <path
             d={`M${String(margin.left)} ${String(margin.top)}V${String(bottom)}H${String(right)}`}
             className="fill-none stroke-ink"
@@ -124,9 +147,9 @@ export function Plot({ title, x, y, series, marks = [], levels = [] }: Props) {
                 className="stroke-copper"
               />
               <text
-                x={right - 4}
+                x={index % 2 === 0 ? right - 4 : margin.left + 4}
                 y={up(level.y) - 5}
-                textAnchor="end"
+                textAnchor={index % 2 === 0 ? 'end' : 'start'}
                 className="fill-copper text-[0.8125rem] font-medium"
               >
                 {level.label}
@@ -143,6 +166,18 @@ export function Plot({ title, x, y, series, marks = [], levels = [] }: Props) {
               className="fill-none stroke-ink"
             />
           ))}
+          {isRead &&
+            series.flatMap((each) =>
+              each.points.map((point) => (
+                <circle
+                  key={`${each.label}${String(point[0])}`}
+                  cx={across(point[0])}
+                  cy={up(point[1])}
+                  r={3}
+                  className="fill-ink"
+                />
+              )),
+            )}
           {marks.map((mark) => (
             <g key={mark.label}>
               <circle
@@ -187,7 +222,7 @@ export function Plot({ title, x, y, series, marks = [], levels = [] }: Props) {
           <Table
             caption={title}
             isCaptionHidden
-            rows={rowsOf(series)}
+            rows={rowsOf(series, isRead)}
             keyOf={(row) => String(row.x)}
             columns={[
               { head: named(x), isNumber: true, cell: (row) => figure(row.x) },

@@ -3,7 +3,7 @@ import type { SurveyInput } from '#shared/surveys/examined.ts';
 import type { Finding } from '#shared/surveys/record.ts';
 import { criteriaFor } from '#shared/surveys/rubric/index.ts';
 import { scoreSurvey } from '#shared/surveys/score.ts';
-import { groupFound } from '#web/features/reports/found.ts';
+import { groupFound } from '#shared/surveys/found.ts';
 import { goodSurvey, withFinding } from '#tests/shared/surveys/example.ts';
 
 const grouped = (survey: SurveyInput) => groupFound({ ...survey, result: scoreSurvey(survey) });

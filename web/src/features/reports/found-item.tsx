@@ -2,13 +2,14 @@ import type { Photo } from '#shared/listings/pictures.ts';
 import { remedies } from '#shared/surveys/record.ts';
 import type { Measurement, Remedy } from '#shared/surveys/record.ts';
 import type { AllowanceLine } from '#shared/surveys/result.ts';
+import { measuredWords } from '#shared/surveys/figure-words.ts';
 import { defectOf } from '#shared/surveys/rubric/index.ts';
 import type { MeasurementSpec } from '#shared/surveys/rubric/types.ts';
 import { formatBand } from '#web/lib/format.ts';
+import { useUnits } from '#web/lib/units.tsx';
 import { GradeMark } from '#web/ui/grade-mark.tsx';
 import { PhotoViewer } from '#web/ui/photo-viewer.tsx';
-import type { Found } from './found.ts';
-import { useShowFigure } from './use-show-figure.ts';
+import type { Found } from '#shared/surveys/found.ts';
 
 /** Where an item stands on the page. */
 export const foundId = (criterionId: string): string => `item-${criterionId.replace('.', '-')}`;
@@ -93,28 +94,7 @@ function Measured({
   specs: readonly MeasurementSpec[];
   measurements: readonly Measurement[];
 }) {
-  const show = useShowFigure();
-  const words = (spec: MeasurementSpec, value: Measurement['value']): string => {
-    if (typeof value === 'boolean') return value ? 'yes' : 'no';
-    if (typeof value === 'string') return spec.choices.find(({ id }) => id === value)?.label ?? value;
-    switch (spec.unit) {
-      case 'Pa/min':
-        return `${show({ value, unit: 'Pa' })} a minute`;
-      case 'text':
-      case 'yes-no':
-      case 'choice':
-        return String(value);
-      case 'Pa':
-      case 'mm':
-      case 'ppm':
-      case 'kg/h':
-      case 'L':
-      case 'count':
-        return show({ value, unit: spec.unit });
-      default:
-        return spec.unit satisfies never;
-    }
-  };
+  const { units } = useUnits();
   const rows = specs
     .map((spec) => ({
       spec,
@@ -127,7 +107,9 @@ function Measured({
       {rows.map(({ spec, values }) => (
         <div key={spec.quantity} className="flex justify-between gap-4 border-b border-rule py-1">
           <dt className="text-pencil">{spec.label}</dt>
-          <dd className="text-right">{values.map((value) => words(spec, value)).join(', ')}</dd>
+          <dd className="text-right">
+            {values.map((value) => measuredWords(spec, value, units)).join(', ')}
+          </dd>
         </div>
       ))}
     </dl>

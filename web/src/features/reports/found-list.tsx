@@ -1,6 +1,6 @@
 import type { Report } from '#shared/surveys/contract.ts';
-import { foundGroups, groupFound } from './found.ts';
-import type { FoundGroup } from './found.ts';
+import { foundGroups, groupFound } from '#shared/surveys/found.ts';
+import type { FoundGroup } from '#shared/surveys/found.ts';
 import { FoundItem } from './found-item.tsx';
 
 const abouts: Partial<Record<FoundGroup, string>> = {

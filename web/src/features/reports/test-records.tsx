@@ -1,13 +1,16 @@
+import { mostWithValveLiftingPa } from '#shared/engineering/safety-valve.ts';
 import { testProfileOf } from '#shared/engineering/test-profiles.ts';
 import type { Report } from '#shared/surveys/contract.ts';
+import { limits } from '#shared/surveys/limits.ts';
 import { leakClasses, leakPlaces } from '#shared/surveys/record.ts';
-import type { HydraulicTest, SteamTest } from '#shared/surveys/record.ts';
+import type { HydraulicTest } from '#shared/surveys/record.ts';
 import { scopes } from '#shared/surveys/scopes.ts';
 import { useUnits } from '#web/lib/units.tsx';
 import { KeyFigures } from '#web/ui/figures.tsx';
 import { Table } from '#web/ui/table.tsx';
+import { ReadingsPlot } from './readings-plot.tsx';
 
-type Tested = Pick<Report, 'record' | 'scope' | 'result'>;
+type Tested = Pick<Report, 'facts' | 'record' | 'scope' | 'result'>;
 
 const orDash = (value: number | null, unit: string): string =>
   value === null ? '–' : `${String(value)}\u00A0${unit}`;
@@ -24,7 +27,19 @@ export function HydraulicRecord({ report }: { report: Tested }) {
     <div className="grid gap-4">
       {outcome && <p>{outcome.text}</p>}
       <HydraulicFigures test={test} />
-      <Readings readings={test.readings} caption="Readings of the hydraulic test" />
+      <ReadingsPlot
+        title="Pressure over the hydraulic test"
+        readings={test.readings}
+        levels={[
+          { label: 'Wanted', pa: test.wantedPa },
+          { label: 'Most allowed', pa: (test.wantedPa * (100 + limits.testOverPercent)) / 100 },
+        ]}
+        hold={
+          test.holdStartMinute === null || test.holdEndMinute === null
+            ? null
+            : { from: test.holdStartMinute, to: test.holdEndMinute }
+        }
+      />
       {test.leaks.length > 0 && (
         <Table
           caption="Leaks"
@@ -68,28 +83,10 @@ function HydraulicFigures({ test }: { test: HydraulicTest }) {
   );
 }
 
-function Readings({ readings, caption }: { readings: SteamTest['readings']; caption: string }) {
-  const { show } = useUnits();
-  if (readings.length === 0) return null;
-  return (
-    <div className="max-w-md">
-      <Table
-        caption={caption}
-        rows={readings.toSorted((a, b) => a.minute - b.minute)}
-        keyOf={(_reading, index) => String(index)}
-        columns={[
-          { head: 'Minute', cell: ({ minute }) => minute },
-          { head: 'Pressure', isNumber: true, cell: ({ pressurePa }) => show('pressure', pressurePa) },
-        ]}
-      />
-    </div>
-  );
-}
-
 /** The test under steam as it was made. */
 export function SteamRecord({ report }: { report: Tested }) {
   const { show } = useUnits();
-  const { record, scope } = report;
+  const { facts, record, scope } = report;
   const { steam: test } = record;
   if (test === null) return <p>{noneText(scopes[scope].steam, record.noSteamReason, 'a steam test')}</p>;
   return (
@@ -110,7 +107,15 @@ export function SteamRecord({ report }: { report: Tested }) {
           { label: 'Carbon monoxide at the operator', value: orDash(test.coPpmAtOperator, 'ppm') },
         ]}
       />
-      <Readings readings={test.readings} caption="Readings of the steam test" />
+      <ReadingsPlot
+        title="Pressure over the steam test"
+        readings={test.readings}
+        levels={[
+          { label: 'Claimed working pressure', pa: facts.workingPressurePa },
+          { label: 'A tenth over', pa: mostWithValveLiftingPa(facts.workingPressurePa) },
+        ]}
+        events={[{ label: 'Lifts', pa: test.valveLiftsAtPa }]}
+      />
       {test.note !== '' && <p>{test.note}</p>}
     </div>
   );

@@ -1,7 +1,7 @@
-import type { Report } from '#shared/surveys/contract.ts';
-import { examinedOf } from '#shared/surveys/examined.ts';
-import type { Examined } from '#shared/surveys/examined.ts';
-import type { AllowanceLine } from '#shared/surveys/result.ts';
+import type { Report } from './contract.ts';
+import { examinedOf } from './examined.ts';
+import type { Examined } from './examined.ts';
+import type { AllowanceLine } from './result.ts';
 
 export const foundGroups = {
   must: 'Must be put right before steaming',
