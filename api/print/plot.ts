@@ -17,7 +17,7 @@ export interface PrintedPlot {
 }
 
 const height = 190;
-const margin = { left: 44, right: 8, top: 8, bottom: 34 };
+const margin = { left: 44, right: 8, top: 16, bottom: 34 };
 
 /** Draws a plot as vectors. The figures stand in a table beside it. */
 export function drawPlot({ doc, left, width, tag, need }: Sheets, plot: PrintedPlot): void {
@@ -61,7 +61,7 @@ export function drawPlot({ doc, left, width, tag, need }: Sheets, plot: PrintedP
       label(figureText(tick), left + margin.left - 5, up(tick) - 4, 'right', 36);
     }
     label(plot.x, (left + margin.left + right) / 2, bottom + 16, 'center', 160);
-    label(plot.y, left, y0 - 2, 'left', 120);
+    label(plot.y, left, y0, 'left', 120);
     doc
       .moveTo(left + margin.left, y0 + margin.top)
       .lineTo(left + margin.left, bottom)

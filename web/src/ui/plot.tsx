@@ -148,7 +148,8 @@ export function Plot({ title, x, y, series, marks = [], levels = [], stretch, is
               />
               <text
                 x={index % 2 === 0 ? right - 4 : margin.left + 4}
-                y={up(level.y) - 5}
+                // Of two near one another, the first is named from below.
+                y={up(level.y) + (index === 0 && levels.length > 1 ? 15 : -5)}
                 textAnchor={index % 2 === 0 ? 'end' : 'start'}
                 className="fill-copper text-[0.8125rem] font-medium"
               >

@@ -13,8 +13,9 @@ export function PartsTable({ boiler }: { boiler: KnownBoiler }) {
   const { facts } = boiler;
   const parts = partsOf(facts, boiler.items);
   const weakest = weakestOf(parts);
-  const stands = ({ standsPa, refusal }: BoilerPart) =>
-    standsPa === null ? (refusal?.text ?? 'Cannot say') : show('pressure', standsPa);
+  const stands = ({ standsPa }: BoilerPart) =>
+    standsPa === null ? 'Cannot say' : show('pressure', standsPa);
+  const gaps = parts.filter(({ refusal }) => refusal !== null);
   return (
     <div className="grid gap-3">
       <Table
@@ -42,7 +43,7 @@ export function PartsTable({ boiler }: { boiler: KnownBoiler }) {
             cell: ({ thicknessMm, isMeasured }) =>
               thicknessMm === null ? '–' : isMeasured ? 'Measured' : 'The seller',
           },
-          { head: 'By calculation', cell: stands },
+          { head: 'By calculation', isNumber: true, cell: stands },
         ]}
       />
       <p>Joints: {jointSays({ jointMetal: jointOfBoiler(boiler), workingPa: facts.workingPressurePa })}</p>
