@@ -46,6 +46,15 @@ export function PartsTable({ boiler }: { boiler: KnownBoiler }) {
           { head: 'By calculation', isNumber: true, cell: stands },
         ]}
       />
+      {gaps.length > 0 && (
+        <ul>
+          {gaps.map(({ id, title, refusal }) => (
+            <li key={id}>
+              {title}: {refusal?.text}
+            </li>
+          ))}
+        </ul>
+      )}
       <p>Joints: {jointSays({ jointMetal: jointOfBoiler(boiler), workingPa: facts.workingPressurePa })}</p>
       <p className="text-sm text-pencil">
         For {show('pressure', facts.workingPressurePa)} claimed. A calculation is no test: it speaks of
