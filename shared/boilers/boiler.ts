@@ -174,6 +174,28 @@ export const boilerFacts = z
         message: 'A tube cannot be as wide as the barrel',
       });
     }
+    if (
+      size.tubeDiameterMm !== null &&
+      size.tubeThicknessMm !== null &&
+      size.tubeThicknessMm * 2 >= size.tubeDiameterMm
+    ) {
+      check.addIssue({
+        code: 'custom',
+        path: ['dimensions', 'tubeThicknessMm'],
+        message: 'That wall leaves no bore in the tube',
+      });
+    }
+    if (
+      size.flueDiameterMm !== null &&
+      size.flueDiameterMm < across &&
+      size.flueDiameterMm + 2 * (size.flueThicknessMm ?? 0) >= across
+    ) {
+      check.addIssue({
+        code: 'custom',
+        path: ['dimensions', 'flueThicknessMm'],
+        message: 'With that wall the flue would be as wide as the barrel',
+      });
+    }
     if (size.barrelThicknessMm !== null && size.barrelThicknessMm * 2 >= across) {
       check.addIssue({
         code: 'custom',

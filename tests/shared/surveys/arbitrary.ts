@@ -42,10 +42,10 @@ export const anyFacts: fc.Arbitrary<BoilerFacts> = fc.record({
     barrelLengthMm: fc.integer({ min: 80, max: 600 }),
     barrelThicknessMm: mm(1, 6),
     endPlateThicknessMm: mm(1, 8),
-    flueDiameterMm: mm(20, 50),
+    flueDiameterMm: mm(20, 45),
     flueThicknessMm: mm(1, 5),
     tubeCount: fc.option(fc.integer({ min: 1, max: 60 }), { nil: null }),
-    tubeDiameterMm: mm(4, 20),
+    tubeDiameterMm: mm(5, 20),
     tubeThicknessMm: mm(1, 2),
     heatingSurfaceM2: fc.option(
       fc.integer({ min: 1, max: 200 }).map((parts) => parts / 100),

@@ -165,9 +165,17 @@ function Screen({ step, survey, draft }: { step: Step; survey: Survey; draft: Dr
         />
       );
     case 'hydraulic':
-      return <HydraulicScreen facts={survey.facts} scope={survey.scope} record={record} edit={edit} />;
+      return (
+        <HydraulicScreen
+          orderId={survey.orderId}
+          facts={survey.facts}
+          scope={survey.scope}
+          record={record}
+          edit={edit}
+        />
+      );
     case 'steam':
-      return <SteamScreen facts={survey.facts} record={record} edit={edit} />;
+      return <SteamScreen orderId={survey.orderId} facts={survey.facts} record={record} edit={edit} />;
     case 'summary':
       return <SummaryScreen record={record} edit={edit} />;
     case 'review':

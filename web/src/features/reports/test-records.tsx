@@ -8,7 +8,7 @@ import { scopes } from '#shared/surveys/scopes.ts';
 import { useUnits } from '#web/lib/units.tsx';
 import { KeyFigures } from '#web/ui/figures.tsx';
 import { Table } from '#web/ui/table.tsx';
-import { ReadingsPlot } from './readings-plot.tsx';
+import { ReadingsPlot } from '#web/ui/readings-plot.tsx';
 
 type Tested = Pick<Report, 'facts' | 'record' | 'scope' | 'result'>;
 

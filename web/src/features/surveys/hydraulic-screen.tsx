@@ -2,6 +2,7 @@ import type { BoilerFacts } from '#shared/boilers/boiler.ts';
 import { testProfileIds, testProfileOf, testProfiles } from '#shared/engineering/test-profiles.ts';
 import type { TestProfileId } from '#shared/engineering/test-profiles.ts';
 import { askedPa, hydraulicTestCheck } from '#shared/surveys/checks-hydraulic.ts';
+import { limits } from '#shared/surveys/limits.ts';
 import type { HydraulicTest, SurveyRecord } from '#shared/surveys/record.ts';
 import type { ScopeId } from '#shared/surveys/scopes.ts';
 import { useUnits } from '#web/lib/units.tsx';
@@ -10,15 +11,22 @@ import { Check, Choices } from '#web/ui/check.tsx';
 import { Field, FieldGroup } from '#web/ui/field.tsx';
 import { Caution, Notice } from '#web/ui/notes.tsx';
 import { Select } from '#web/ui/select.tsx';
+import { ReadingsPlot } from '#web/ui/readings-plot.tsx';
 import { FigureInput } from './figure-input.tsx';
+import { GaugeAdvice } from './gauge-advice.tsx';
+import { HoldTimer } from './hold-timer.tsx';
 import { LeakFields } from './leak-fields.tsx';
+import { RaisingList } from './raising-list.tsx';
 import { ReadingsTable } from './readings-table.tsx';
 import { changeHydraulic, emptyHydraulic } from './record-edits.ts';
 import type { Edit } from './record-edits.ts';
+import { useTestClock } from './test-clock.ts';
 import { TestOrReason } from './test-or-reason.tsx';
 import { WordsInput } from './words-input.tsx';
 
 interface Props {
+  /** The order, whose clock it is. */
+  orderId: string;
   facts: BoilerFacts;
   scope: ScopeId;
   record: SurveyRecord;
@@ -26,7 +34,7 @@ interface Props {
 }
 
 /** The cold water test: wanted pressure worked out, precautions ticked where they are taken, readings, hold and leaks. */
-export function HydraulicScreen({ facts, scope, record, edit }: Props) {
+export function HydraulicScreen({ orderId, facts, scope, record, edit }: Props) {
   const { hydraulic: test } = record;
   const start = () => {
     edit((so) => {
@@ -52,6 +60,7 @@ export function HydraulicScreen({ facts, scope, record, edit }: Props) {
         />
       ) : (
         <TestFields
+          orderId={orderId}
           facts={facts}
           scope={scope}
           record={record}
@@ -79,8 +88,9 @@ interface TestProps extends Omit<Props, 'edit'> {
   onRemove: () => void;
 }
 
-function TestFields({ facts, scope, record, test, onChange, onRemove }: TestProps) {
+function TestFields({ orderId, facts, scope, record, test, onChange, onRemove }: TestProps) {
   const { show } = useUnits();
+  const clock = useTestClock(`${orderId}.hydraulic`);
   const { status, text } = hydraulicTestCheck({ facts, record, scope });
   const kind = { pass: 'good', fail: 'bad', 'cannot-say': 'plain' } as const;
   const profile = testProfileOf(test.profileId);
@@ -153,9 +163,12 @@ function TestFields({ facts, scope, record, test, onChange, onRemove }: TestProp
           }}
         />
       </FieldGroup>
+      <GaugeAdvice wantedPa={test.wantedPa} record={record} />
+      <RaisingList test={test} />
       <ReadingsTable
         readings={test.readings}
         from="the first stroke"
+        clock={clock}
         onChange={(readings) => {
           const minutes = new Set(readings.map(({ minute }) => minute));
           const keep = (minute: number | null) => (minute !== null && minutes.has(minute) ? minute : null);
@@ -165,6 +178,15 @@ function TestFields({ facts, scope, record, test, onChange, onRemove }: TestProp
             holdEndMinute: keep(test.holdEndMinute),
           });
         }}
+      />
+      <HoldTimer test={test} clock={clock} onChange={onChange} />
+      <ReadingsPlot
+        title="Pressure so far"
+        readings={test.readings}
+        levels={[
+          { label: 'Wanted', pa: test.wantedPa },
+          { label: 'Most allowed', pa: (test.wantedPa * (100 + limits.testOverPercent)) / 100 },
+        ]}
       />
       <FieldGroup
         legend="The hold"

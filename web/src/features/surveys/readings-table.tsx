@@ -1,9 +1,10 @@
-import { useEffect, useState } from 'react';
+import { useState } from 'react';
 import type { HydraulicTest } from '#shared/surveys/record.ts';
 import { useUnits } from '#web/lib/units.tsx';
 import { Button } from '#web/ui/button.tsx';
 import { FigureInput } from './figure-input.tsx';
 import { quantityOf, shownText } from './quantities.ts';
+import type { TestClock } from './test-clock.ts';
 
 type Reading = HydraulicTest['readings'][number];
 
@@ -11,45 +12,20 @@ interface Props {
   readings: readonly Reading[];
   /** What the first minute counts from. */
   from: string;
+  clock: TestClock;
   onChange: (readings: Reading[]) => void;
 }
 
-const minutesSince = (startMs: number): number => Math.round((Date.now() - startMs) / 6_000) / 10;
 const maxPa = 6_000_000;
 
-/** Minutes since the clock was started on this page; it helps to read, and what is kept is what is written down. */
-function useClock() {
-  const [startMs, setStartMs] = useState<number>();
-  const [minutes, setMinutes] = useState(0);
-  useEffect(() => {
-    if (startMs === undefined) return undefined;
-    const timer = setInterval(() => {
-      setMinutes(minutesSince(startMs));
-    }, 1_000);
-    return () => {
-      clearInterval(timer);
-    };
-  }, [startMs]);
-  return {
-    isRunning: startMs !== undefined,
-    minutes,
-    start: () => {
-      setMinutes(0);
-      setStartMs(Date.now());
-    },
-    read: () => (startMs === undefined ? null : minutesSince(startMs)),
-  };
-}
-
 /** Pressure against time as read off the test gauge, with a clock for whoever has a hand on the pump. */
-export function ReadingsTable({ readings, from, onChange }: Props) {
+export function ReadingsTable({ readings, from, clock, onChange }: Props) {
   const { units } = useUnits();
-  const clock = useClock();
   const [pressurePa, setPressurePa] = useState<number | null>(null);
   const [minute, setMinute] = useState<number | null>(null);
   const [count, setCount] = useState(0);
   const quantity = quantityOf('Pa', units);
-  const at = minute ?? clock.read();
+  const at = minute ?? (clock.isRunning ? clock.minutes : null);
   const add = () => {
     if (pressurePa === null || at === null) return;
     onChange([...readings, { minute: at, pressurePa }].toSorted((a, b) => a.minute - b.minute));

@@ -5,22 +5,28 @@ import { useUnits } from '#web/lib/units.tsx';
 import { Button } from '#web/ui/button.tsx';
 import { Check } from '#web/ui/check.tsx';
 import { Caution } from '#web/ui/notes.tsx';
+import { ReadingsPlot } from '#web/ui/readings-plot.tsx';
 import { FigureInput } from './figure-input.tsx';
 import { ReadingsTable } from './readings-table.tsx';
 import { changeSteam, emptySteam } from './record-edits.ts';
 import type { Edit } from './record-edits.ts';
+import { StopButton } from './stop-button.tsx';
+import { useTestClock } from './test-clock.ts';
 import { TestOrReason } from './test-or-reason.tsx';
+import { TimedFeed } from './timed-feed.tsx';
 import { WordsInput } from './words-input.tsx';
 import { YesNo } from './yes-no.tsx';
 
 interface Props {
+  /** The order, whose clock it is. */
+  orderId: string;
   facts: BoilerFacts;
   record: SurveyRecord;
   edit: (change: Edit) => void;
 }
 
 /** The test under steam. */
-export function SteamScreen({ facts, record, edit }: Props) {
+export function SteamScreen({ orderId, facts, record, edit }: Props) {
   const { steam: test } = record;
   return (
     <div className="grid gap-6">
@@ -42,6 +48,7 @@ export function SteamScreen({ facts, record, edit }: Props) {
         />
       ) : (
         <TestFields
+          orderId={orderId}
           facts={facts}
           test={test}
           onChange={(change) => {
@@ -57,18 +64,21 @@ export function SteamScreen({ facts, record, edit }: Props) {
 }
 
 interface TestProps {
+  orderId: string;
   facts: BoilerFacts;
   test: SteamTest;
   onChange: (change: Partial<SteamTest>) => void;
   onRemove: () => void;
 }
 
-function TestFields({ facts, test, onChange, onRemove }: TestProps) {
+function TestFields({ orderId, facts, test, onChange, onRemove }: TestProps) {
   const { show } = useUnits();
+  const clock = useTestClock(`${orderId}.steam`);
   const mostPa = mostWithValveLiftingPa(facts.workingPressurePa);
   const pressure = { unit: 'Pa', min: 0, max: 6_000_000 } as const;
   return (
     <>
+      <StopButton firing={facts.firing} />
       <Check
         label="Steam was raised to working pressure"
         checked={test.raisedSteam}
@@ -152,6 +162,12 @@ function TestFields({ facts, test, onChange, onRemove }: TestProps) {
             onChange({ evaporationKgPerH });
           }}
         />
+        <TimedFeed
+          name={`${orderId}.feed`}
+          onTimed={(evaporationKgPerH) => {
+            onChange({ evaporationKgPerH });
+          }}
+        />
       </section>
       <section className="grid gap-4" aria-label="Fire">
         <h2 className="text-lg">Fire</h2>
@@ -185,9 +201,18 @@ function TestFields({ facts, test, onChange, onRemove }: TestProps) {
       <ReadingsTable
         readings={test.readings}
         from="lighting up"
+        clock={clock}
         onChange={(readings) => {
           onChange({ readings });
         }}
+      />
+      <ReadingsPlot
+        title="Pressure so far"
+        readings={test.readings}
+        levels={[
+          { label: 'Claimed working pressure', pa: facts.workingPressurePa },
+          { label: 'A tenth over', pa: mostPa },
+        ]}
       />
       <WordsInput
         label="Note"

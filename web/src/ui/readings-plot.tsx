@@ -1,7 +1,7 @@
 import type { SteamTest } from '#shared/surveys/record.ts';
 import { fromSi, unitOf } from '#web/lib/format.ts';
 import { useUnits } from '#web/lib/units.tsx';
-import { Plot } from '#web/ui/plot.tsx';
+import { Plot } from './plot.tsx';
 
 interface Props {
   title: string;
