@@ -1,12 +1,14 @@
 import { listedText } from '#shared/engineering/quantities.ts';
 import type { UnitSystem } from '#shared/engineering/quantities.ts';
 import type { Report } from '#shared/surveys/contract.ts';
+import { examinedOf } from '#shared/surveys/examined.ts';
 import { grades } from '#shared/surveys/record.ts';
 import type { Grade } from '#shared/surveys/record.ts';
 import { extras, scopes } from '#shared/surveys/scopes.ts';
 import { verdicts } from '#shared/surveys/verdicts.ts';
 import { dayOf, dayText } from '#shared/time.ts';
 import { drawMark, inkOfGrade } from '../../print/marks.ts';
+import { printDrawing } from '../../print/drawing.ts';
 import { openSheets } from '../../print/sheets.ts';
 import type { Paper, Sheets } from '../../print/sheets.ts';
 import { printAllowance } from './allowance.ts';
@@ -130,6 +132,14 @@ export function printReport(report: Report, options: Options): Promise<Buffer> {
       { weight: 'medium' },
     );
   });
+  sheets.heading(2, 'Drawing');
+  const items = examinedOf({ facts, record });
+  printDrawing(
+    sheets,
+    facts,
+    record.rubricVersion,
+    new Map(items.map(({ criterion, finding }) => [criterion.id, finding.grade])),
+  );
   if (record.summary !== '') {
     sheets.heading(2, 'From the surveyor');
     sheets.tag('P', () => {

@@ -1,10 +1,12 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
-import { useParams } from 'react-router-dom';
+import { Link, useParams } from 'react-router-dom';
 import type { Listing } from '#shared/listings/contract.ts';
 import { laggingAnswers } from '#shared/listings/draft.ts';
 import { listingStatusLabels } from '#shared/listings/machine.ts';
 import { sitePaths } from '#shared/site-paths.ts';
+import { rubricVersion } from '#shared/surveys/rubric/index.ts';
 import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
+import { GeneralArrangement } from '#web/drawings/general-arrangement.tsx';
 import { useMe } from '#web/features/accounts/use-me.ts';
 import { FittingsAndPapers, Nameplate, Sizes } from '#web/features/listings/facts.tsx';
 import { listingQueries } from '#web/features/listings/queries.ts';
@@ -115,6 +117,21 @@ export function Component() {
         <div>
           <Section title="Survey reports">
             <ReportsList reports={listing.reports} />
+          </Section>
+          <Section title="General arrangement">
+            <GeneralArrangement
+              facts={facts}
+              rubricVersion={rubricVersion}
+              label="General arrangement of this type of boiler, in proportion to the seller’s sizes"
+            />
+            <p className="mt-2 text-sm text-pencil">
+              Of the type, in proportion to the seller’s sizes; not a drawing of this very boiler. The numbers
+              are those of the{' '}
+              <Link className="link" to={sitePaths.method}>
+                survey method
+              </Link>
+              .
+            </p>
           </Section>
           <Section title="The seller says">
             <p className="max-w-prose whitespace-pre-line">{listing.description}</p>

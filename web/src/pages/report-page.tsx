@@ -4,6 +4,7 @@ import { examinedOf } from '#shared/surveys/examined.ts';
 import { extras, scopes } from '#shared/surveys/scopes.ts';
 import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
 import { sitePaths } from '#shared/site-paths.ts';
+import { GeneralArrangement } from '#web/drawings/general-arrangement.tsx';
 import { useMe } from '#web/features/accounts/use-me.ts';
 import { AcceptReport } from '#web/features/reports/accept-report.tsx';
 import { ChecksList } from '#web/features/reports/checks-list.tsx';
@@ -37,6 +38,7 @@ export function Component() {
   const me = useMe();
   const { listing, surveyor, facts, scope, record, result, photos, sellerPhotos, viewer } = report;
   const boiler: KnownBoiler = { facts, items: examinedOf({ facts, record }), record };
+  const gradesFound = new Map(boiler.items.map(({ criterion, finding }) => [criterion.id, finding.grade]));
   const examined = record.examinedOn === null ? formatInstant(report.filedAt) : formatDay(record.examinedOn);
   const covered = [scopes[scope].label, ...report.extras.map((extra) => extras[extra].label)];
   return (
@@ -66,6 +68,19 @@ export function Component() {
           <PhotoViewer photos={photos} title="The surveyor’s photographs" layout="lead" />
         )}
       </div>
+      <Section title="Drawing">
+        <GeneralArrangement
+          facts={facts}
+          rubricVersion={record.rubricVersion}
+          label="General arrangement with the grade of each item; what each balloon says is listed under What was found"
+          gradeOf={(criterionId) => gradesFound.get(criterionId)}
+          hrefOf={(criterionId) => `#${foundId(criterionId)}`}
+        />
+        <p className="mt-2 text-sm text-pencil">
+          Of the type, in proportion to the sizes given; not a drawing of this very boiler. A balloon leads to
+          what was found.
+        </p>
+      </Section>
       {record.summary !== '' && (
         <Section title="From the surveyor">
           <p className="max-w-prose whitespace-pre-line">{record.summary}</p>
