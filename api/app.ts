@@ -18,6 +18,7 @@ import { workingsRoutes } from './features/workings/routes.ts';
 import { officeRoutes } from './features/office/routes.ts';
 import { photoRoutes } from './features/photos/routes.ts';
 import { placeRoutes } from './features/places/routes.ts';
+import { replyRoutes } from './features/replies/routes.ts';
 import { reportRoutes } from './features/reports/routes.ts';
 import { paymentNoticeRoutes } from './features/settlements/routes.ts';
 import { surveyOrderRoutes } from './features/survey-orders/routes.ts';
@@ -110,7 +111,7 @@ export function createApp(deps: Deps): Express {
   );
   app.use('/media', attachCtx(deps));
   app.use(accountRoutes(deps.letters), placeRoutes, listingRoutes, photoRoutes(deps.uploadsDir));
-  app.use(examinationRoutes, reportRoutes, printedReportRoutes(deps.rateFactor));
+  app.use(examinationRoutes, reportRoutes, replyRoutes, printedReportRoutes(deps.rateFactor));
   app.use(methodRoutes(deps.rateFactor), workingsRoutes(deps.rateFactor));
   app.use(surveyorRoutes, surveyOrderRoutes, engineRoutes, deskRoutes, officeRoutes);
   app.use(openApiRoute(publicUrl));

@@ -23,6 +23,8 @@ export const reportSummary = z.object({
   verdict: verdictId,
   condition: z.int().nullable(),
   evidence: z.int(),
+  /** 1 as first filed; more where it was corrected. */
+  version: z.int(),
 });
 export type ReportSummary = z.infer<typeof reportSummary>;
 

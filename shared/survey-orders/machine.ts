@@ -60,8 +60,11 @@ export const orderStatusLabels: Record<OrderStatus, string> = {
   cancelled: 'Cancelled before payment',
 };
 
+/** What an order's record holds: its moves, and what happened without moving it. */
+export type RecordedEvent = OrderEvent | 'place' | 'correctReport';
+
 /** What the record says of an event, in the past tense. */
-export const orderEventLabels: Record<OrderEvent | 'place', string> = {
+export const orderEventLabels: Record<RecordedEvent, string> = {
   place: 'Survey commissioned',
   pay: 'Paid; the money is held until the report is in',
   accept: 'Accepted by the surveyor',
@@ -72,6 +75,7 @@ export const orderEventLabels: Record<OrderEvent | 'place', string> = {
   begin: 'Examination begun',
   abandon: 'Examination given up',
   fileReport: 'Report filed',
+  correctReport: 'Report corrected by the surveyor',
   acceptReport: 'Report accepted by the buyer',
   endReview: 'Review period ended',
   release: 'Fee released to the surveyor',
@@ -88,3 +92,8 @@ export const orderClocks = {
   /** Days the buyer has to read the report before the fee is released. */
   reviewDays: 5,
 } as const;
+
+const correctable: ReadonlySet<OrderStatus> = new Set(['in-review', 'settling', 'settled']);
+
+/** Whether the report of an order in this state may be corrected: it is in, and the order stands. */
+export const mayCorrectReport = (status: OrderStatus): boolean => correctable.has(status);

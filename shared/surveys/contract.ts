@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { boilerFacts } from '../boilers/boiler.ts';
 import { byId, endpoint } from '../endpoint.ts';
 import { photo } from '../listings/pictures.ts';
-import { instant } from '../time.ts';
+import { day, instant } from '../time.ts';
 import { agreement } from './agreement.ts';
 import { methodDataSchema } from './method.ts';
 import { signOff, surveyRecord } from './record.ts';
@@ -23,6 +23,8 @@ export const survey = z.object({
   savedAt: instant,
   isFiled: z.boolean(),
   reportId: z.uuid().nullable(),
+  /** While a filed report is corrected: which, its version, and why. */
+  correction: z.object({ reportId: z.uuid(), version: z.int(), reason: z.string() }).nullable(),
 });
 export type Survey = z.infer<typeof survey>;
 
@@ -103,17 +105,29 @@ export const getReportAgreements = endpoint({
   response: z.object({ items: z.array(reportAgreement) }),
 });
 
+/** What stands behind a check code on the day it is asked. */
+export const checkedReport = z.object({
+  status: z.enum(['genuine', 'superseded', 'changed', 'unknown']),
+  reportId: z.uuid().nullable(),
+  version: z.int().nullable(),
+  filedAt: instant.nullable(),
+  examinedOn: day.nullable(),
+  /** Whole days since the examination. */
+  ageDays: z.int().nullable(),
+  isOld: z.boolean(),
+  /** The newest version, where this is not it. */
+  newer: z.object({ reportId: z.uuid(), version: z.int(), filedAt: instant, reason: z.string() }).nullable(),
+});
+export type CheckedReport = z.infer<typeof checkedReport>;
+
 export const checkReport = endpoint({
   name: 'checkReport',
-  summary: 'Whether a check code is that of a filed report, unchanged since',
+  summary:
+    'Whether a check code is that of a filed report, unchanged and not corrected since, and how old it is',
   method: 'GET',
   path: '/api/checks/:code',
   params: z.strictObject({ code: z.string().min(4).max(20) }),
-  response: z.object({
-    status: z.enum(['genuine', 'changed', 'unknown']),
-    reportId: z.uuid().nullable(),
-    filedAt: instant.nullable(),
-  }),
+  response: checkedReport,
 });
 
 export const getMethod = endpoint({

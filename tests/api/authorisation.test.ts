@@ -49,6 +49,7 @@ const buyerAlone: Columns = [401, 404, 403, 'in', 403, 404, 403];
 const surveyorAlone: Columns = [401, 404, 403, 403, 'in', 404, 403];
 const sellerAlone: Columns = [401, 404, 'in', 403, 403, 404, 403];
 const surveyorOfIt: Columns = [401, 404, 404, 404, 'in', 404, 404];
+const sellerOfReport: Columns = [401, 403, 'in', 403, 403, 403, 403];
 const machineOnly: Columns = ['in', 'in', 'in', 'in', 'in', 'in', 'in'];
 
 async function world(site: Site) {
@@ -241,6 +242,36 @@ const table: Record<string, Row> = {
   getReportAgreements: [
     ({ reviewed, filed }) => of(reviewed, 'get', `/api/reports/${filed.id}/agreements`),
     everyone,
+  ],
+  getReportVersions: [
+    ({ reviewed, filed }) => of(reviewed, 'get', `/api/reports/${filed.id}/versions`),
+    everyone,
+  ],
+  startCorrection: [
+    ({ reviewed, filed }) =>
+      of(reviewed, 'post', `/api/reports/${filed.id}/corrections`, { reason: 'A figure was misread.' }),
+    [401, 403, 403, 403, 'in', 403, 403],
+  ],
+  giveUpCorrection: [({ reviewed }) => order(reviewed, 'delete', '/survey/correction'), surveyorOfIt],
+  getReportReplies: [
+    ({ reviewed, filed }) => of(reviewed, 'get', `/api/reports/${filed.id}/replies`),
+    everyone,
+  ],
+  replyToFinding: [
+    ({ reviewed, filed }) =>
+      of(reviewed, 'post', `/api/reports/${filed.id}/replies`, {
+        criterionId: 'safety.glass',
+        text: 'Cleaned since.',
+      }),
+    sellerOfReport,
+  ],
+  listRepair: [
+    ({ reviewed, filed }, site) =>
+      of(reviewed, 'post', `/api/reports/${filed.id}/repairs`, {
+        text: 'Water gauge cleaned.',
+        doneOn: dayOf(site.clock.now()),
+      }),
+    sellerOfReport,
   ],
   checkReport: [({ reviewed, filed }) => of(reviewed, 'get', `/api/checks/${filed.checkCode}`), everyone],
   getMethod: [({ placed }) => of(placed, 'get', '/api/method'), everyone],

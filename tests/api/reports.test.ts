@@ -5,6 +5,7 @@ import type { SurveyOrder } from '#shared/survey-orders/contract.ts';
 import type { Report } from '#shared/surveys/contract.ts';
 import { canonicalJson } from '#shared/surveys/canonical.ts';
 import { scoreSurvey } from '#shared/surveys/score.ts';
+import { dayOf, daysBetween } from '#shared/time.ts';
 import { file, givenExamination, givenRecorded } from '#tests/support/examinations.ts';
 import type { Examination } from '#tests/support/examinations.ts';
 import { givenSite } from '#tests/support/site.ts';
@@ -70,6 +71,7 @@ describe('a filed report', () => {
         verdict: 'repair-before-steaming',
         condition: report.result.condition,
         evidence: report.result.evidence,
+        version: 1,
       },
     ]);
     const order = (
@@ -89,7 +91,16 @@ describe('a filed report', () => {
 describe('the check code', () => {
   test('of a report that stands as filed is genuine, however it is typed', async () => {
     expect(report.checkCode).toMatch(/^[0-9A-HJKMNP-TV-Z]{4}-[0-9A-HJKMNP-TV-Z]{4}$/);
-    const genuine = { status: 'genuine', reportId: report.id, filedAt: report.filedAt };
+    const genuine = {
+      status: 'genuine',
+      reportId: report.id,
+      version: 1,
+      filedAt: report.filedAt,
+      examinedOn: '2026-05-16',
+      ageDays: daysBetween('2026-05-16', dayOf(site.clock.now())),
+      isOld: false,
+      newer: null,
+    };
     expect(await check(report.checkCode)).toEqual(genuine);
     expect(await check(report.checkCode.toLowerCase().replace('-', ' '))).toEqual(genuine);
     expect(await check(report.checkCode.replace('-', '').replaceAll('0', 'o').replaceAll('1', 'l'))).toEqual(
@@ -98,7 +109,16 @@ describe('the check code', () => {
   });
 
   test('of nothing is unknown', async () => {
-    const unknown = { status: 'unknown', reportId: null, filedAt: null };
+    const unknown = {
+      status: 'unknown',
+      reportId: null,
+      version: null,
+      filedAt: null,
+      examinedOn: null,
+      ageDays: null,
+      isOld: false,
+      newer: null,
+    };
     expect(await check('0000-0000')).toEqual(unknown);
     expect(await check('not a code')).toEqual(unknown);
   });
@@ -116,6 +136,7 @@ describe('the check code', () => {
     ['what the seller stated', `facts = jsonb_set(facts, '{workingPressurePa}', '700000')`],
     ['the signature', `sign_off = jsonb_set(sign_off, '{name}', '"Somebody Else"')`],
     ['the scope', `scope = 'external'`],
+    ['the version', `version = 2`],
   ])('shows that %s was changed behind the product’s back', async (_what, assignment) => {
     const { query } = site.deps.database.raw;
     const other = await givenExamination(site);

@@ -1,6 +1,6 @@
 import { bigint, check, index, integer, jsonb, pgTable, text, timestamp, uuid } from 'drizzle-orm/pg-core';
 import { sql } from 'drizzle-orm';
-import type { OrderEvent, OrderStatus } from '#shared/survey-orders/machine.ts';
+import type { OrderStatus, RecordedEvent } from '#shared/survey-orders/machine.ts';
 import type { Quotation } from '#shared/survey-orders/pricing.ts';
 import type { ExtraId, ScopeId } from '#shared/surveys/scopes.ts';
 import { user } from './auth.ts';
@@ -54,7 +54,7 @@ export const surveyOrderEvents = pgTable(
     orderId: uuid()
       .notNull()
       .references(() => surveyOrders.id),
-    event: text().$type<OrderEvent | 'place'>().notNull(),
+    event: text().$type<RecordedEvent>().notNull(),
     from: text().$type<OrderStatus>().notNull(),
     to: text().$type<OrderStatus>().notNull(),
     /** Null when the system moved it. */

@@ -17,7 +17,8 @@ import * as surveys from '../surveys/service.ts';
 import type { StoredSurvey } from '../surveys/service.ts';
 
 async function describe(ctx: Ctx, stored: StoredSurvey): Promise<Survey> {
-  const { orderId, listing, facts, scope, extras, record, version, savedAt, isFiled, reportId } = stored;
+  const { orderId, listing, facts, scope, extras, record, version, savedAt, isFiled, reportId, correction } =
+    stored;
   return {
     orderId,
     listing: { ...listing, photos: await photos.listPhotosOfListing(ctx, listing.id) },
@@ -30,6 +31,7 @@ async function describe(ctx: Ctx, stored: StoredSurvey): Promise<Survey> {
     savedAt,
     isFiled,
     reportId,
+    correction,
   };
 }
 
@@ -93,17 +95,38 @@ export async function fileSurvey(
       'The result computed here differs from the one on your screen. Load the page again, read the result, and sign that one.',
     );
   const reportId = await inTransaction(ctx, async (ctx) => {
+    // Held first, as where a correction begins: two at once then wait for each other in the same order.
+    const corrected = survey.correction && (await surveyOrders.holdCorrectable(ctx, orderId));
+    const correction = survey.correction && {
+      correctsReportId: survey.correction.reportId,
+      version: survey.correction.version + 1,
+      reason: survey.correction.reason,
+    };
     await surveys.closeSurvey(ctx, survey);
+    const { rubricVersion } = record;
     const id = await reports.keepReport(ctx, {
       orderId,
       listingId: listing.id,
       surveyorId,
-      filed: { scope, extras, facts, record, result, signOff, rubricVersion: record.rubricVersion },
+      filed: {
+        scope,
+        extras,
+        facts,
+        record,
+        result,
+        signOff,
+        rubricVersion,
+        ...(correction && { correction }),
+      },
       photos: held,
     });
+    const [newest] = await surveys.listReportSummaries(ctx, listing.id);
     const { verdict, condition, evidence } = result;
-    await listings.attachVerdict(ctx, listing.id, { verdict: verdict.id, condition, evidence });
-    await surveyOrders.reportFiled(ctx, orderId);
+    // A correction of an old report does not push a later survey off the listing.
+    if (newest?.reportId === id)
+      await listings.attachVerdict(ctx, listing.id, { verdict: verdict.id, condition, evidence });
+    if (corrected && correction) await surveyOrders.reportCorrected(ctx, corrected, correction);
+    else await surveyOrders.reportFiled(ctx, orderId);
     return id;
   });
   return reports.getReport(ctx, reportId);

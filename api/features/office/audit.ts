@@ -3,7 +3,7 @@ import type { ListingEvent } from '#shared/listings/machine.ts';
 import { paymentStatusLabels } from '#shared/payments/machine.ts';
 import type { PaymentStatus } from '#shared/payments/machine.ts';
 import { orderEventLabels } from '#shared/survey-orders/machine.ts';
-import type { OrderEvent } from '#shared/survey-orders/machine.ts';
+import type { RecordedEvent } from '#shared/survey-orders/machine.ts';
 import { roles } from '#shared/accounts/roles.ts';
 import type { Role } from '#shared/accounts/roles.ts';
 import { sitePaths } from '#shared/site-paths.ts';
@@ -28,7 +28,7 @@ export const roleAct = (change: 'grant' | 'withdraw', role: Role): string =>
 function wordsOf({ kind, what }: StoredEntry): string {
   switch (kind) {
     case 'order':
-      return orderEventLabels[what as OrderEvent | 'place'];
+      return orderEventLabels[what as RecordedEvent];
     case 'listing':
       return listingEventLabels[what as ListingEvent];
     case 'payment':

@@ -176,7 +176,7 @@ async function getOwnPhoto(ctx: Ctx, id: string) {
   const actor = requireActor(ctx);
   const photo = await getPhoto(ctx, id);
   if (photo.ownerId !== actor.id) throw new Problem('not-found');
-  if (photo.orderId !== null) await surveys.requireOpenSurvey(ctx, photo.orderId);
+  if (photo.orderId !== null) await surveys.requireUnfiledPhoto(ctx, photo.orderId, id);
   const listing = photo.listingId === null ? undefined : await requireOwnListing(ctx, photo.listingId);
   return { photo, listing };
 }

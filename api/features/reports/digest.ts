@@ -14,11 +14,13 @@ export interface Filed {
   result: SurveyResult;
   signOff: SignOff;
   rubricVersion: string;
+  /** Only of a corrected version. */
+  correction?: { correctsReportId: string; version: number; reason: string } | undefined;
 }
 
 /** SHA-256, hex, over the canonical JSON of what was filed and the hashes of its photographs as received. */
 export function digestOf(filed: Filed, photos: readonly { id: string; sha256: string }[]): string {
-  const { scope, extras, facts, record, result, signOff, rubricVersion } = filed;
+  const { scope, extras, facts, record, result, signOff, rubricVersion, correction } = filed;
   const hashes = photos
     .map(({ id, sha256 }) => ({ id, sha256 }))
     .toSorted((a, b) => compareCodeUnits(a.id, b.id));
@@ -31,6 +33,7 @@ export function digestOf(filed: Filed, photos: readonly { id: string; sha256: st
     signOff,
     rubricVersion,
     photos: hashes,
+    correction,
   });
   return createHash('sha256').update(text, 'utf8').digest('hex');
 }

@@ -1,4 +1,5 @@
-import { desc, eq } from 'drizzle-orm';
+import { and, asc, desc, eq, notExists } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/pg-core';
 import type { OrderStatus } from '#shared/survey-orders/machine.ts';
 import type { ExtraId } from '#shared/surveys/scopes.ts';
 import type { Instant } from '#shared/time.ts';
@@ -14,6 +15,7 @@ export interface StoredReport extends Filed {
   filedAt: Instant;
   digest: string;
   checkCode: string;
+  version: number;
 }
 
 export interface NewReport extends Filed {
@@ -25,10 +27,17 @@ export interface NewReport extends Filed {
   checkCode: string;
 }
 
-export async function insertReport(db: Db, report: NewReport): Promise<string> {
+export async function insertReport(db: Db, { correction, ...report }: NewReport): Promise<string> {
   const [row] = await db
     .insert(reports)
-    .values({ ...report, extras: [...report.extras], filedAt: new Date(report.filedAt) })
+    .values({
+      ...report,
+      extras: [...report.extras],
+      filedAt: new Date(report.filedAt),
+      version: correction?.version ?? 1,
+      correctsReportId: correction?.correctsReportId ?? null,
+      correctionReason: correction?.reason ?? null,
+    })
     .returning({ id: reports.id });
   if (!row) throw new Error('The report was not stored');
   return row.id;
@@ -75,6 +84,15 @@ const fromRow = ({ report, order, listing, surveyorName, surveyorNumber }: Row):
   filedAt: report.filedAt.toISOString(),
   digest: report.digest,
   checkCode: report.checkCode,
+  version: report.version,
+  correction:
+    report.correctsReportId === null && report.correctionReason === null && report.version === 1
+      ? undefined
+      : {
+          correctsReportId: report.correctsReportId ?? '',
+          version: report.version,
+          reason: report.correctionReason ?? '',
+        },
 });
 
 export async function findReportIdOfOrder(db: Db, orderId: string): Promise<string | undefined> {
@@ -82,9 +100,15 @@ export async function findReportIdOfOrder(db: Db, orderId: string): Promise<stri
     .select({ id: reports.id })
     .from(reports)
     .where(eq(reports.orderId, orderId))
-    .orderBy(desc(reports.filedAt))
+    .orderBy(desc(reports.version))
     .limit(1);
   return row?.id;
+}
+
+/** Every version of the report of an order, oldest first. */
+export async function listVersionsOfOrder(db: Db, orderId: string): Promise<StoredReport[]> {
+  const rows = await find(db).where(eq(reports.orderId, orderId)).orderBy(asc(reports.version));
+  return rows.map(fromRow);
 }
 
 export async function findReport(db: Db, id: string): Promise<StoredReport | undefined> {
@@ -97,10 +121,12 @@ export async function findReportByCode(db: Db, checkCode: string): Promise<Store
   return row && fromRow(row);
 }
 
-/** Every report filed on a boiler, newest first. */
+/** The newest version of every report filed on a boiler, newest first. */
 export async function listReportsOfListing(db: Db, listingId: string): Promise<StoredReport[]> {
+  const newer = alias(reports, 'newer');
+  const corrected = db.select({ id: newer.id }).from(newer).where(eq(newer.correctsReportId, reports.id));
   const rows = await find(db)
-    .where(eq(reports.listingId, listingId))
+    .where(and(eq(reports.listingId, listingId), notExists(corrected)))
     .orderBy(desc(reports.filedAt), reports.id);
   return rows.map(fromRow);
 }

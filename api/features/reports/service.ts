@@ -2,14 +2,17 @@ import { Problem } from '#shared/problem.ts';
 import type { Photo } from '#shared/listings/pictures.ts';
 import { surveyOrderMachine } from '#shared/survey-orders/machine.ts';
 import { agreementOf } from '#shared/surveys/agreement.ts';
-import type { Report, ReportAgreement } from '#shared/surveys/contract.ts';
-import type { Instant } from '#shared/time.ts';
+import { isOldReport } from '#shared/surveys/age.ts';
+import type { CheckedReport, Report, ReportAgreement } from '#shared/surveys/contract.ts';
+import { dayOf, daysBetween } from '#shared/time.ts';
 import type { Ctx } from '../../ctx.ts';
 import * as photos from '../photos/service.ts';
 import { checkCodeOf, digestOf, readCheckCode } from './digest.ts';
 import type { Filed } from './digest.ts';
 import * as repo from './repo.ts';
 import type { StoredReport } from './repo.ts';
+
+export type { StoredReport } from './repo.ts';
 
 const photoIdsOf = ({ record }: Filed): Set<string> =>
   new Set(record.findings.flatMap(({ photoIds }) => photoIds));
@@ -88,7 +91,7 @@ export async function getReportAgreements(ctx: Ctx, id: string): Promise<{ items
   if (!stored) throw new Problem('not-found');
   const all = await repo.listReportsOfListing(ctx.db, stored.listing.id);
   const items = all
-    .filter((other) => other.id !== id)
+    .filter((other) => other.order.id !== stored.order.id)
     .map((other) => ({
       id: other.id,
       filedAt: other.filedAt,
@@ -99,19 +102,56 @@ export async function getReportAgreements(ctx: Ctx, id: string): Promise<{ items
   return { items };
 }
 
-interface Checked {
-  status: 'genuine' | 'changed' | 'unknown';
-  reportId: string | null;
-  filedAt: Instant | null;
+/** A filed report as it is kept, for features that stand above. @throws Problem not-found. */
+export async function getStoredReport(ctx: Ctx, id: string): Promise<StoredReport> {
+  const stored = await repo.findReport(ctx.db, id);
+  if (!stored) throw new Problem('not-found');
+  return stored;
 }
 
-/** Works the digest out again from what is stored now, and says whether it is still the one that was filed. */
-export async function checkReport(ctx: Ctx, typed: string): Promise<Checked> {
+/** Every version of the report of an order, oldest first. */
+export const listStoredVersions = (ctx: Ctx, orderId: string): Promise<StoredReport[]> =>
+  repo.listVersionsOfOrder(ctx.db, orderId);
+
+const unknownCode: CheckedReport = {
+  status: 'unknown',
+  reportId: null,
+  version: null,
+  filedAt: null,
+  examinedOn: null,
+  ageDays: null,
+  isOld: false,
+  newer: null,
+};
+
+/**
+ * Works the digest out again from what is stored now, and says whether it is still the one that was filed, whether it
+ * was corrected since, and how old it is.
+ */
+export async function checkReport(ctx: Ctx, typed: string): Promise<CheckedReport> {
   const code = readCheckCode(typed);
   const stored = code === undefined ? undefined : await repo.findReportByCode(ctx.db, code);
-  if (!stored) return { status: 'unknown', reportId: null, filedAt: null };
+  if (!stored) return unknownCode;
   const held = await photos.listPhotosOfOrder(ctx, stored.order.id);
   const digest = digestOf(stored, shownIn(stored, held));
   const isGenuine = digest === stored.digest && checkCodeOf(digest) === stored.checkCode;
-  return { status: isGenuine ? 'genuine' : 'changed', reportId: stored.id, filedAt: stored.filedAt };
+  const newest = (await listStoredVersions(ctx, stored.order.id)).at(-1);
+  const newer = newest !== undefined && newest.version > stored.version ? newest : null;
+  const examinedOn = stored.record.examinedOn ?? dayOf(stored.filedAt);
+  const today = dayOf(ctx.now());
+  return {
+    status: isGenuine ? (newer === null ? 'genuine' : 'superseded') : 'changed',
+    reportId: stored.id,
+    version: stored.version,
+    filedAt: stored.filedAt,
+    examinedOn,
+    ageDays: daysBetween(examinedOn, today),
+    isOld: isOldReport(examinedOn, today),
+    newer: newer && {
+      reportId: newer.id,
+      version: newer.version,
+      filedAt: newer.filedAt,
+      reason: newer.correction?.reason ?? '',
+    },
+  };
 }

@@ -209,6 +209,19 @@ export function lettersOf(moved: Moved, by: Part | 'system'): LetterJob[] {
   return [];
 }
 
+/** A corrected version of the report is in: the buyer and the seller get it, with the reason. */
+export function correctionLetters(moved: Omit<Moved, 'event'>, version: number): LetterJob[] {
+  const parts: Recipient[] = ['buyer', 'seller'];
+  return parts.map((to) => ({
+    ...letterTo(to, { ...moved, event: 'fileReport' }, 'The report has been corrected', [
+      `The surveyor has corrected the report and signed it again. This is version ${String(version)}; it comes with this letter.`,
+      ...because({ ...moved, event: 'fileReport' }),
+      'The earlier version can still be read, and is marked as superseded.',
+    ]),
+    withReportOfOrder: moved.order.id,
+  }));
+}
+
 /** To a buyer whose card was charged after the order had been given up. */
 export const latePaymentLetter = (moved: Omit<Moved, 'event'>): LetterJob =>
   letterTo('buyer', { ...moved, event: 'refund' }, 'Your payment came too late', [

@@ -1,6 +1,6 @@
 import { and, asc, desc, eq, inArray, notInArray, or, sql } from 'drizzle-orm';
 import type { Currency, Money } from '#shared/money.ts';
-import type { OrderEvent, OrderStatus } from '#shared/survey-orders/machine.ts';
+import type { OrderEvent, OrderStatus, RecordedEvent } from '#shared/survey-orders/machine.ts';
 import type { Quotation } from '#shared/survey-orders/pricing.ts';
 import type { ExtraId, ScopeId } from '#shared/surveys/scopes.ts';
 import type { Instant } from '#shared/time.ts';
@@ -193,8 +193,20 @@ export async function moveOrder(db: Db, seen: StoredOrder, move: OrderMove): Pro
   return true;
 }
 
+/** Puts into the record of an order what did not move it. */
+export async function insertEvent(
+  db: Db,
+  order: Pick<StoredOrder, 'id' | 'status'>,
+  { event, actorId, reason, at }: { event: RecordedEvent; actorId: string; reason: string; at: Instant },
+): Promise<void> {
+  const { id: orderId, status } = order;
+  await db
+    .insert(surveyOrderEvents)
+    .values({ orderId, event, from: status, to: status, actorId, reason, at: new Date(at) });
+}
+
 export interface StoredEvent {
-  event: OrderEvent | 'place';
+  event: RecordedEvent;
   at: Instant;
   actorId: string | null;
   actorName: string | null;

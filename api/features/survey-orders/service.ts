@@ -1,6 +1,6 @@
 import { pointer, invalidField, Problem } from '#shared/problem.ts';
 import type { OrderSummary, SurveyOrder } from '#shared/survey-orders/contract.ts';
-import { surveyOrderMachine } from '#shared/survey-orders/machine.ts';
+import { mayCorrectReport, surveyOrderMachine } from '#shared/survey-orders/machine.ts';
 import type { OrderEvent, OrderStatus } from '#shared/survey-orders/machine.ts';
 import { addDays, isBefore, msBetween } from '#shared/time.ts';
 import type { Instant } from '#shared/time.ts';
@@ -11,9 +11,10 @@ import * as listings from '../listings/service.ts';
 import * as payments from '../payments/service.ts';
 import * as surveys from '../surveys/service.ts';
 import { addressText, calendarFile } from './calendar.ts';
+import { correctionLetters } from './letters.ts';
 import { closeCheckout, receivePayment } from './money.ts';
 import { countAgreed, move } from './moves.ts';
-import { getOwnOrder, holdOwnOrder, maySeeAddress, partOf } from './parties.ts';
+import { getOwnOrder, getParties, holdOwnOrder, maySeeAddress, partOf } from './parties.ts';
 import type { Part } from './parties.ts';
 import * as repo from './repo.ts';
 import type { OrderMove, StoredOrder } from './repo.ts';
@@ -160,6 +161,33 @@ export const abandonSurvey = (ctx: Ctx, id: string, reason: string): Promise<Sur
 /** The surveyor has filed the report. Called in the transaction that files it. */
 export async function reportFiled(ctx: Ctx, orderId: string): Promise<void> {
   await moveOwn(ctx, orderId, 'fileReport');
+}
+
+/**
+ * Holds an order whose report its surveyor may correct, until the transaction ends.
+ * @throws Problem not-found, not-permitted, wrong-state.
+ */
+export async function holdCorrectable(ctx: Ctx, orderId: string): Promise<StoredOrder> {
+  const { order, part } = await holdOwnOrder(ctx, orderId);
+  if (part !== 'surveyor')
+    throw new Problem('not-permitted', 'Only the surveyor who filed it may correct it.');
+  if (!mayCorrectReport(order.status))
+    throw new Problem('wrong-state', 'A report can be corrected only while its order stands.');
+  return order;
+}
+
+/** A corrected version has been filed: into the record, and letters. Called in the transaction that files it. */
+export async function reportCorrected(
+  ctx: Ctx,
+  order: StoredOrder,
+  { version, reason }: { version: number; reason: string },
+): Promise<void> {
+  const { id: actorId } = requireActor(ctx);
+  await repo.insertEvent(ctx.db, order, { event: 'correctReport', actorId, reason, at: ctx.now() });
+  const parties = await getParties(ctx, order);
+  const { publicUrl } = ctx.site;
+  for (const letter of correctionLetters({ order, parties, reason, publicUrl }, version))
+    await ctx.queue.enqueue(ctx, 'send-letter', letter);
 }
 
 export const acceptReport = (ctx: Ctx, id: string): Promise<SurveyOrder> => act(ctx, id, 'acceptReport');

@@ -82,7 +82,7 @@ export async function countReports(db: Db, userIds: readonly string[]): Promise<
   const rows = await db
     .select({ userId: reports.surveyorId, filed: count() })
     .from(reports)
-    .where(inArray(reports.surveyorId, [...userIds]))
+    .where(and(inArray(reports.surveyorId, [...userIds]), eq(reports.version, 1)))
     .groupBy(reports.surveyorId);
   return new Map(rows.map((row) => [row.userId, row.filed]));
 }

@@ -1,4 +1,5 @@
-import { and, desc, eq, isNull } from 'drizzle-orm';
+import { and, desc, eq, isNotNull, isNull, notExists, sql } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/pg-core';
 import type { BoilerFacts } from '#shared/boilers/boiler.ts';
 import type { ListingDraft } from '#shared/listings/draft.ts';
 import type { ReportSummary } from '#shared/listings/contract.ts';
@@ -24,19 +25,28 @@ export interface StoredSurvey {
   version: number;
   savedAt: Instant;
   isFiled: boolean;
+  /** The newest version of the report. */
   reportId: string | null;
+  correction: { reportId: string; version: number; reason: string } | null;
 }
 
 export async function findSurvey(db: Db, orderId: string): Promise<StoredSurvey | undefined> {
   const [row] = await db
-    .select({ survey: surveys, order: surveyOrders, listing: listings, reportId: reports.id })
+    .select({
+      survey: surveys,
+      order: surveyOrders,
+      listing: listings,
+      report: { id: reports.id, version: reports.version },
+    })
     .from(surveys)
     .innerJoin(surveyOrders, eq(surveyOrders.id, surveys.orderId))
     .innerJoin(listings, eq(listings.id, surveyOrders.listingId))
     .leftJoin(reports, eq(reports.orderId, surveys.orderId))
-    .where(eq(surveys.orderId, orderId));
+    .where(eq(surveys.orderId, orderId))
+    .orderBy(desc(reports.version))
+    .limit(1);
   if (!row) return undefined;
-  const { survey, order, listing, reportId } = row;
+  const { survey, order, listing, report } = row;
   return {
     orderId: survey.orderId,
     orderStatus: order.status,
@@ -51,7 +61,15 @@ export async function findSurvey(db: Db, orderId: string): Promise<StoredSurvey 
     version: survey.version,
     savedAt: survey.savedAt.toISOString(),
     isFiled: survey.filedAt !== null,
-    reportId,
+    reportId: report?.id ?? null,
+    correction:
+      survey.correctsReportId === null || report === null
+        ? null
+        : {
+            reportId: survey.correctsReportId,
+            version: report.version,
+            reason: survey.correctionReason ?? '',
+          },
   };
 }
 
@@ -93,14 +111,69 @@ export async function updateRecord(db: Db, { orderId, version, record, at }: Sav
 export async function updateFiled(db: Db, { orderId, version, at }: Omit<Save, 'record'>): Promise<boolean> {
   const rows = await db
     .update(surveys)
-    .set({ filedAt: new Date(at) })
+    .set({ filedAt: new Date(at), correctsReportId: null, correctionReason: null })
     .where(and(eq(surveys.orderId, orderId), eq(surveys.version, version), isNull(surveys.filedAt)))
     .returning({ orderId: surveys.orderId });
   return rows.length > 0;
 }
 
+interface Reopening {
+  orderId: string;
+  reportId: string;
+  reason: string;
+  /** A copy of what was filed. */
+  record: SurveyRecord;
+  at: Instant;
+}
+
+/** @returns false if the survey is open already. */
+export async function updateReopened(
+  db: Db,
+  { orderId, reportId, reason, record, at }: Reopening,
+): Promise<boolean> {
+  const rows = await db
+    .update(surveys)
+    .set({
+      record,
+      filedAt: null,
+      savedAt: new Date(at),
+      version: sql`${surveys.version} + 1`,
+      correctsReportId: reportId,
+      correctionReason: reason,
+    })
+    .where(and(eq(surveys.orderId, orderId), isNotNull(surveys.filedAt)))
+    .returning({ orderId: surveys.orderId });
+  return rows.length > 0;
+}
+
+/** Puts back what was filed and when. @returns false if no correction is open. */
+export async function updateClosedAgain(
+  db: Db,
+  { orderId, record, at }: Pick<Reopening, 'orderId' | 'record' | 'at'>,
+): Promise<boolean> {
+  const rows = await db
+    .update(surveys)
+    .set({
+      record,
+      filedAt: new Date(at),
+      version: sql`${surveys.version} + 1`,
+      correctsReportId: null,
+      correctionReason: null,
+    })
+    .where(and(eq(surveys.orderId, orderId), isNull(surveys.filedAt), isNotNull(surveys.correctsReportId)))
+    .returning({ orderId: surveys.orderId });
+  return rows.length > 0;
+}
+
+/** The photographs that some filed version of an order's report names. */
+export async function listFiledPhotoIds(db: Db, orderId: string): Promise<Set<string>> {
+  const rows = await db.select({ record: reports.record }).from(reports).where(eq(reports.orderId, orderId));
+  return new Set(rows.flatMap(({ record }) => record.findings.flatMap(({ photoIds }) => photoIds)));
+}
+
 const summaryColumns = {
   id: reports.id,
+  version: reports.version,
   filedAt: reports.filedAt,
   record: reports.record,
   scope: reports.scope,
@@ -115,19 +188,33 @@ const toSummary = (row: Pick<typeof reports.$inferSelect, keyof typeof summaryCo
   verdict: row.result.verdict.id,
   condition: row.result.condition,
   evidence: row.result.evidence,
+  version: row.version,
 });
 
-/** Newest first. */
+/** The newest version of each report, the last surveyed first: a correction does not make an old survey new. */
 export async function listSummaries(db: Db, listingId: string): Promise<ReportSummary[]> {
+  const newer = alias(reports, 'newer');
+  const first = alias(reports, 'first');
   const rows = await db
     .select(summaryColumns)
     .from(reports)
-    .where(eq(reports.listingId, listingId))
-    .orderBy(desc(reports.filedAt));
+    .innerJoin(first, and(eq(first.orderId, reports.orderId), eq(first.version, 1)))
+    .where(
+      and(
+        eq(reports.listingId, listingId),
+        notExists(db.select({ id: newer.id }).from(newer).where(eq(newer.correctsReportId, reports.id))),
+      ),
+    )
+    .orderBy(desc(first.filedAt));
   return rows.map(toSummary);
 }
 
 export async function findSummaryOfOrder(db: Db, orderId: string): Promise<ReportSummary | undefined> {
-  const [row] = await db.select(summaryColumns).from(reports).where(eq(reports.orderId, orderId));
+  const [row] = await db
+    .select(summaryColumns)
+    .from(reports)
+    .where(eq(reports.orderId, orderId))
+    .orderBy(desc(reports.version))
+    .limit(1);
   return row && toSummary(row);
 }

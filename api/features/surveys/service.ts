@@ -1,9 +1,11 @@
 import { boilerFacts } from '#shared/boilers/boiler.ts';
 import type { ReportSummary } from '#shared/listings/contract.ts';
 import { Problem } from '#shared/problem.ts';
+import { mayCorrectReport } from '#shared/survey-orders/machine.ts';
 import { emptyRecord } from '#shared/surveys/record.ts';
 import type { SurveyRecord } from '#shared/surveys/record.ts';
 import { rubricVersion } from '#shared/surveys/rubric/index.ts';
+import type { Instant } from '#shared/time.ts';
 import { requireActor } from '../../ctx.ts';
 import type { Ctx } from '../../ctx.ts';
 import * as repo from './repo.ts';
@@ -46,7 +48,9 @@ export async function requireOpenSurvey(ctx: Ctx, orderId: string): Promise<Stor
   const found = await repo.findSurvey(ctx.db, orderId);
   if (found?.surveyorId !== actor.id) throw new Problem('not-found');
   if (found.isFiled) throw new Problem('wrong-state', 'The report has been filed; it cannot be changed.');
-  if (found.orderStatus !== 'examining')
+  const isUnderWay =
+    found.correction === null ? found.orderStatus === 'examining' : mayCorrectReport(found.orderStatus);
+  if (!isUnderWay)
     throw new Problem('wrong-state', 'This examination is not under way, so nothing can be recorded in it.');
   return found;
 }
@@ -76,7 +80,52 @@ export async function closeSurvey(ctx: Ctx, survey: StoredSurvey): Promise<void>
   if (!isClosed) throw stale();
 }
 
-/** The reports of a listing, newest first. */
+interface Correction {
+  orderId: string;
+  reportId: string;
+  reason: string;
+  record: SurveyRecord;
+}
+
+/** Opens a filed survey again on a copy of what was filed. @throws Problem changed-meanwhile if it is open already. */
+export async function reopenSurvey(ctx: Ctx, correction: Correction): Promise<void> {
+  const isReopened = await repo.updateReopened(ctx.db, { ...correction, at: ctx.now() });
+  if (!isReopened)
+    throw new Problem(
+      'changed-meanwhile',
+      'A correction of this report is open already, here or on another device. Go on with that one.',
+    );
+}
+
+/** Closes a survey whose correction is given up, as it was filed. @throws Problem changed-meanwhile. */
+export async function closeSurveyAgain(
+  ctx: Ctx,
+  filed: { orderId: string; record: SurveyRecord; at: Instant },
+): Promise<void> {
+  const isClosed = await repo.updateClosedAgain(ctx.db, filed);
+  if (!isClosed) throw new Problem('changed-meanwhile');
+}
+
+/** The order of a report whose correction this person has open; null if there is none. */
+export async function findOpenCorrection(ctx: Ctx, orderId: string): Promise<string | null> {
+  const found = await repo.findSurvey(ctx.db, orderId);
+  return found && found.correction !== null && found.surveyorId === ctx.actor?.id ? orderId : null;
+}
+
+/**
+ * A photograph of an open survey may be changed unless a filed report rests on it.
+ * @throws Problem not-signed-in, not-found, wrong-state.
+ */
+export async function requireUnfiledPhoto(ctx: Ctx, orderId: string, photoId: string): Promise<void> {
+  await requireOpenSurvey(ctx, orderId);
+  if ((await repo.listFiledPhotoIds(ctx.db, orderId)).has(photoId))
+    throw new Problem(
+      'wrong-state',
+      'This photograph is part of a filed report, so it stays. Take it off the finding, or add another.',
+    );
+}
+
+/** The newest version of each report of a listing, the last surveyed first. */
 export const listReportSummaries = (ctx: Ctx, listingId: string): Promise<ReportSummary[]> =>
   repo.listSummaries(ctx.db, listingId);
 
