@@ -23,8 +23,8 @@ export const surveys: Record<string, SeedSurvey> = {
       'shell.stays': {
         grade: 'sound',
         measurements: [
-          { quantity: 'pitchMm', value: 24 },
-          { quantity: 'diameterMm', value: 4.76 },
+          { quantity: 'pitchMm', value: 20 },
+          { quantity: 'diameterMm', value: 5.55 },
           { quantity: 'threadsPerInch', value: 40 },
         ],
       },

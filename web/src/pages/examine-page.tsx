@@ -7,7 +7,9 @@ import { rubricOf } from '#shared/surveys/rubric/index.ts';
 import { scoreSurvey } from '#shared/surveys/score.ts';
 import { scopes } from '#shared/surveys/scopes.ts';
 import { sitePaths } from '#shared/site-paths.ts';
+import { GeneralArrangement } from '#web/drawings/general-arrangement.tsx';
 import { ResultSummary } from '#web/features/reports/result-summary.tsx';
+import { CorrectionNote } from '#web/features/surveys/correction-note.tsx';
 import { ExamineBar } from '#web/features/surveys/examine-bar.tsx';
 import { FindingScreen } from '#web/features/surveys/finding-screen.tsx';
 import { HydraulicScreen } from '#web/features/surveys/hydraulic-screen.tsx';
@@ -87,6 +89,14 @@ function Examination({ survey }: { survey: Survey }) {
         {step === undefined ? (
           <>
             <p className="text-pencil">{scopes[survey.scope].label}</p>
+            {survey.correction !== null && <Correcting survey={survey} draft={draft} />}
+            <GeneralArrangement
+              facts={survey.facts}
+              rubricVersion={draft.record.rubricVersion}
+              label="Drawing of this type of boiler; a balloon opens its item, and the list below has the same"
+              gradeOf={(criterionId) => findingOf(draft.record, criterionId)?.grade}
+              hrefOf={hrefOf}
+            />
             <SectionList steps={steps} record={draft.record} hrefOf={hrefOf} />
           </>
         ) : (
@@ -110,6 +120,19 @@ function Examination({ survey }: { survey: Survey }) {
       />
       <LeaveGuard draft={draft} />
     </div>
+  );
+}
+
+function Correcting({ survey, draft }: { survey: Survey; draft: Draft }) {
+  const navigate = useNavigate();
+  const { correction, orderId } = survey;
+  return correction === null ? null : (
+    <CorrectionNote
+      orderId={orderId}
+      correction={correction}
+      draft={draft}
+      onGivenUp={() => void navigate(sitePaths.report(correction.reportId), { replace: true })}
+    />
   );
 }
 
