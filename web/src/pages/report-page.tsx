@@ -6,14 +6,19 @@ import type { KnownBoiler } from '#shared/workings/from-boiler.ts';
 import { sitePaths } from '#shared/site-paths.ts';
 import { GeneralArrangement } from '#web/drawings/general-arrangement.tsx';
 import { useMe } from '#web/features/accounts/use-me.ts';
+import { FindingReply } from '#web/features/replies/finding-reply.tsx';
+import { replyQueries } from '#web/features/replies/queries.ts';
+import { RepairsSince } from '#web/features/replies/repairs-since.tsx';
 import { AcceptReport } from '#web/features/reports/accept-report.tsx';
 import { ChecksList } from '#web/features/reports/checks-list.tsx';
+import { CorrectReport } from '#web/features/reports/correct-report.tsx';
 import { foundId } from '#web/features/reports/found-item.tsx';
 import { FoundList } from '#web/features/reports/found-list.tsx';
 import { InstrumentsTable } from '#web/features/reports/instruments-table.tsx';
 import { PrintLinks } from '#web/features/reports/print-links.tsx';
 import { PutRight } from '#web/features/reports/put-right.tsx';
 import { reportQueries } from '#web/features/reports/queries.ts';
+import { ReportStanding } from '#web/features/reports/report-standing.tsx';
 import { ResultSummary } from '#web/features/reports/result-summary.tsx';
 import { SectionMeans } from '#web/features/reports/section-means.tsx';
 import { SurveyedTwice } from '#web/features/reports/surveyed-twice.tsx';
@@ -31,8 +36,13 @@ import { PhotoViewer } from '#web/ui/photo-viewer.tsx';
 /** A filed report, for anyone. */
 export function Component() {
   const { id = '' } = useParams();
-  const [{ data: report }, { data: agreements }] = useSuspenseQueries({
-    queries: [reportQueries.detail(id), reportQueries.agreements(id)],
+  const [{ data: report }, { data: agreements }, { data: versions }, { data: replies }] = useSuspenseQueries({
+    queries: [
+      reportQueries.detail(id),
+      reportQueries.agreements(id),
+      reportQueries.versions(id),
+      replyQueries.ofReport(id),
+    ],
   });
   const { show } = useUnits();
   const me = useMe();
@@ -40,6 +50,7 @@ export function Component() {
   const boiler: KnownBoiler = { facts, items: examinedOf({ facts, record }), record };
   const gradesFound = new Map(boiler.items.map(({ criterion, finding }) => [criterion.id, finding.grade]));
   const examined = record.examinedOn === null ? formatInstant(report.filedAt) : formatDay(record.examinedOn);
+  const version = versions.items.find(({ reportId }) => reportId === id)?.version ?? 1;
   const covered = [scopes[scope].label, ...report.extras.map((extra) => extras[extra].label)];
   return (
     <Page
@@ -51,6 +62,13 @@ export function Component() {
       ]}
       sub={`Examined ${examined} · ${covered.join(', ').toLowerCase()} · claimed working pressure ${show('pressure', facts.workingPressurePa)}`}
     >
+      <ReportStanding
+        reportId={id}
+        versions={versions.items}
+        examinedOn={record.examinedOn ?? report.filedAt.slice(0, 10)}
+        today={new Date().toISOString().slice(0, 10)}
+      />
+      <CorrectReport reportId={id} viewer={versions.viewer} />
       {viewer.canAccept && viewer.orderId !== null && (
         <div className="mb-6">
           <AcceptReport orderId={viewer.orderId} />
@@ -97,8 +115,18 @@ export function Component() {
         </div>
       </div>
       <Section title="What was found">
-        <FoundList report={report} />
+        <FoundList
+          report={report}
+          under={({ criterion }) => (
+            <FindingReply reportId={id} version={version} criterion={criterion} replies={replies} />
+          )}
+        />
       </Section>
+      {(replies.repairs.length > 0 || replies.viewer.canReply) && (
+        <Section title="Repairs since, by the seller">
+          <RepairsSince reportId={id} replies={replies} />
+        </Section>
+      )}
       {agreements.items.length > 0 && (
         <Section title={agreements.items.length === 1 ? 'Surveyed twice' : 'Surveyed more than once'}>
           <SurveyedTwice others={agreements.items} />
@@ -168,6 +196,7 @@ export function Component() {
             value: `${report.signOff.name}, ${formatDay(report.filedAt.slice(0, 10))}`,
           },
           { label: 'Method', value: record.rubricVersion },
+          ...(version > 1 ? [{ label: 'Version', value: `${String(version)}, corrected` }] : []),
           {
             label: 'Check code',
             value: (

@@ -13,7 +13,7 @@ export function ReportsList({ reports }: { reports: readonly ReportSummary[] }) 
   return (
     <>
       <ul className="divide-y divide-rule border-y border-rule">
-        {reports.map(({ reportId, verdict, condition, evidence, examinedOn, scope }) => (
+        {reports.map(({ reportId, verdict, condition, evidence, examinedOn, scope, version }) => (
           <li
             key={reportId}
             className="relative flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1 py-3"
@@ -28,6 +28,7 @@ export function ReportsList({ reports }: { reports: readonly ReportSummary[] }) 
             </span>
             <span className="w-full text-sm text-pencil">
               {scopes[scope as ScopeId].label}, examined {formatDay(examinedOn)}
+              {version > 1 && `, corrected: version ${String(version)}`}
             </span>
           </li>
         ))}

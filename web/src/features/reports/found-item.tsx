@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { Photo } from '#shared/listings/pictures.ts';
 import { remedies } from '#shared/surveys/record.ts';
 import type { Measurement, Remedy } from '#shared/surveys/record.ts';
@@ -21,8 +22,15 @@ const waysText = ({ criterion, finding }: Found): string =>
     .join(', ')
     .toLowerCase();
 
+interface FoundItemProps {
+  found: Found;
+  photos: readonly Photo[];
+  /** What another feature says of the item. */
+  under?: ReactNode;
+}
+
 /** One item as examined: grade, how it was examined, what is wrong, what was measured, and the photographs. */
-export function FoundItem({ found, photos }: { found: Found; photos: readonly Photo[] }) {
+export function FoundItem({ found, photos, under }: FoundItemProps) {
   const { criterion, finding, lines } = found;
   const own = finding.photoIds.flatMap((id) => photos.find((photo) => photo.id === id) ?? []);
   const ways = waysText(found);
@@ -58,6 +66,7 @@ export function FoundItem({ found, photos }: { found: Found; photos: readonly Ph
             <PhotoViewer photos={own} title={criterion.title} layout="row" />
           </div>
         )}
+        {under}
       </div>
     </article>
   );

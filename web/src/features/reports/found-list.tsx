@@ -1,6 +1,7 @@
+import type { ReactNode } from 'react';
 import type { Report } from '#shared/surveys/contract.ts';
 import { foundGroups, groupFound } from '#shared/surveys/found.ts';
-import type { FoundGroup } from '#shared/surveys/found.ts';
+import type { Found, FoundGroup } from '#shared/surveys/found.ts';
 import { FoundItem } from './found-item.tsx';
 
 const abouts: Partial<Record<FoundGroup, string>> = {
@@ -9,7 +10,7 @@ const abouts: Partial<Record<FoundGroup, string>> = {
 };
 
 /** Everything that applies to this boiler, the most pressing first. */
-export function FoundList({ report }: { report: Report }) {
+export function FoundList({ report, under }: { report: Report; under?: (found: Found) => ReactNode }) {
   return (
     <div className="grid gap-8">
       {[...groupFound(report)]
@@ -22,7 +23,12 @@ export function FoundList({ report }: { report: Report }) {
             {abouts[group] !== undefined && <p className="pt-1 text-sm text-pencil">{abouts[group]}</p>}
             <div className={group === 'well' ? 'gap-x-10 lg:columns-2' : ''}>
               {items.map((found) => (
-                <FoundItem key={found.criterion.id} found={found} photos={report.photos} />
+                <FoundItem
+                  key={found.criterion.id}
+                  found={found}
+                  photos={report.photos}
+                  under={under?.(found)}
+                />
               ))}
             </div>
           </section>
