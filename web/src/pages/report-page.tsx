@@ -66,7 +66,6 @@ export function Component() {
         reportId={id}
         versions={versions.items}
         examinedOn={record.examinedOn ?? report.filedAt.slice(0, 10)}
-        today={new Date().toISOString().slice(0, 10)}
       />
       <CorrectReport reportId={id} viewer={versions.viewer} />
       {viewer.canAccept && viewer.orderId !== null && (

@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import { isOldReport, oldAfterMonths } from '#shared/surveys/age.ts';
 import type { ReportVersions } from '#shared/surveys/corrections.ts';
@@ -9,12 +10,13 @@ interface Props {
   reportId: string;
   versions: ReportVersions['items'];
   examinedOn: string;
-  /** The day it is read. */
-  today: string;
 }
 
+const todayUtc = (): string => new Date().toISOString().slice(0, 10);
+
 /** Above a report: whether it was superseded, what it corrects, and whether it is old. Nothing where none applies. */
-export function ReportStanding({ reportId, versions, examinedOn, today }: Props) {
+export function ReportStanding({ reportId, versions, examinedOn }: Props) {
+  const [today] = useState(todayUtc);
   const own = versions.find((each) => each.reportId === reportId);
   const newest = versions.at(-1);
   const earlier = versions.filter((each) => own !== undefined && each.version < own.version);

@@ -18,6 +18,11 @@ interface Props {
 export function CorrectionNote({ orderId, correction, draft, onGivenUp }: Props) {
   const [isOpen, setIsOpen] = useState(false);
   const giveUp = useGiveUpCorrection(orderId);
+  const dropIt = async () => {
+    // What is unsent goes first, so that nothing is sent after the survey is closed.
+    await draft.store.flush();
+    giveUp.mutate(undefined, { onSuccess: onGivenUp });
+  };
   return (
     <Notice>
       <p className="font-medium">You are correcting version {correction.version} of a filed report.</p>
@@ -44,16 +49,7 @@ export function CorrectionNote({ orderId, correction, draft, onGivenUp }: Props)
           <p>What you changed here is dropped. The report stands as you filed it.</p>
           {giveUp.isError && <Notice kind="bad">{messageOf(giveUp.error)}</Notice>}
           <div>
-            <Button
-              kind="danger"
-              isPending={giveUp.isPending}
-              onClick={() => {
-                // What is unsent goes first, so that nothing is sent after the survey is closed.
-                void draft.store.flush().then(() => {
-                  giveUp.mutate(undefined, { onSuccess: onGivenUp });
-                });
-              }}
-            >
+            <Button kind="danger" isPending={giveUp.isPending} onClick={() => void dropIt()}>
               Give it up
             </Button>
           </div>
