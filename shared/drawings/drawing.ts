@@ -71,3 +71,17 @@ export const clamp = (value: number, least: number, most: number): number =>
 /** Places evenly spread between two ends, neither end among them. */
 export const between = (from: number, to: number, count: number): number[] =>
   Array.from({ length: count }, (_, index) => from + ((to - from) * (index + 1)) / (count + 1));
+
+/** What is left of a plate between two ends where openings pass through it. */
+export function solidBetween(
+  from: number,
+  to: number,
+  openings: readonly (readonly [from: number, to: number])[],
+): (readonly [from: number, to: number])[] {
+  const edges = openings.toSorted(([a], [b]) => a - b);
+  const starts = [from, ...edges.map(([, end]) => end)];
+  const ends = [...edges.map(([start]) => start), to];
+  return starts
+    .map((start, index) => [start, ends[index] ?? to] as const)
+    .filter(([start, end]) => end > start);
+}

@@ -1,5 +1,5 @@
 import type { BoilerFacts } from '../boilers/boiler.ts';
-import { between, clamp, line, rect } from './drawing.ts';
+import { between, clamp, line, rect, solidBetween } from './drawing.ts';
 import type { Sheet, Spot } from './drawing.ts';
 import { drawFire, drawFittings, drawWater } from './fittings.ts';
 
@@ -18,7 +18,7 @@ interface Shell {
 function shellOf({ dimensions: size, type }: BoilerFacts): Shell {
   const aspect = clamp(size.barrelLengthMm / size.barrelOutsideDiameterMm, 1.2, 3.6);
   const length = type === 'locomotive' ? 260 : 300;
-  const height = clamp(length / aspect, 96, 180);
+  const height = clamp(length / aspect, 116, 188);
   const left = type === 'locomotive' ? 268 : 210;
   return {
     left,
@@ -29,15 +29,23 @@ function shellOf({ dimensions: size, type }: BoilerFacts): Shell {
   };
 }
 
-/** Barrel and ends in section, with what every horizontal boiler has. */
-function drawShell(sheet: Sheet, { left, right, top, bottom }: Shell): void {
+type Openings = readonly (readonly [from: number, to: number])[];
+
+/** Barrel and ends in section; a flue leaves its opening in each end that it passes, a firebox leaves no end at all. */
+function drawShell(
+  sheet: Sheet,
+  { left, right, top, bottom }: Shell,
+  openings: { left?: Openings | 'none'; right?: Openings } = {},
+): void {
+  const end = (x: number, gaps: Openings): string[] =>
+    solidBetween(top + wall, bottom - wall, gaps).map(([from, to]) => rect(x, from, wall, to - from));
   sheet.add('centre', line([left - 40, middle], [right + 60, middle]));
   sheet.add(
     'cut',
     rect(left, top, right - left, wall),
     rect(left, bottom - wall, right - left, wall),
-    rect(left, top, wall, bottom - top),
-    rect(right - wall, top, wall, bottom - top),
+    ...(openings.left === 'none' ? [] : end(left, openings.left ?? [])),
+    ...end(right - wall, openings.right ?? []),
   );
   sheet.point('shell.barrel', left + (right - left) * 0.72, bottom - 3);
   sheet.point('shell.plates', right - 3, top + 22);
@@ -99,19 +107,33 @@ const mountsOn = (shell: Shell, more: { glass: Spot; glassSide: -1 | 1 }) => ({
 export function drawLocomotive(sheet: Sheet, facts: BoilerFacts): void {
   const shell = shellOf(facts);
   const { left, right, top, bottom } = shell;
-  drawShell(sheet, shell);
+  const shown = clamp(Math.round(Math.sqrt(facts.dimensions.tubeCount ?? 14)), 3, 6);
+  const tubes = between(top + 30, bottom - wall - 4, shown);
+  drawShell(sheet, shell, { left: 'none', right: tubes.map((y) => [y - 4, y + 4] as const) });
   const [boxLeft, boxTop, boxBottom] = [left - 96, top - 12, bottom + 74];
+  const [inLeft, inRight, inTop] = [boxLeft + 22, left - 22, top + 26];
+  const doorY = inTop + (boxBottom - inTop) * 0.45;
   sheet.add(
     'cut',
     rect(boxLeft, boxTop, 96, wall),
-    rect(boxLeft, boxTop, wall, boxBottom - boxTop),
-    rect(left - wall, bottom, wall, boxBottom - bottom),
+    ...solidBetween(boxTop + wall, boxBottom, [[doorY - 11, doorY + 11]]).map(([from, to]) =>
+      rect(boxLeft, from, wall, to - from),
+    ),
+    rect(left - wall, boxTop + wall, wall, top - boxTop),
+    rect(left - wall, bottom - wall, wall, boxBottom - bottom + wall),
   );
-  const [inLeft, inRight, inTop] = [boxLeft + 22, left - 18, top + 26];
   sheet.add(
     'cut',
-    rect(inLeft, inTop, 5, boxBottom - inTop),
-    rect(inRight - 5, inTop, 5, boxBottom - inTop),
+    ...solidBetween(inTop + 5, boxBottom, [[doorY - 11, doorY + 11]]).map(([from, to]) =>
+      rect(inLeft, from, 5, to - from),
+    ),
+    ...solidBetween(
+      inTop + 5,
+      boxBottom,
+      tubes.map((y) => [y - 4, y + 4] as const),
+    ).map(([from, to]) => rect(inRight - 5, from, 5, to - from)),
+    rect(boxLeft + wall, doorY - 15, inLeft - boxLeft - wall + 5, 4),
+    rect(boxLeft + wall, doorY + 11, inLeft - boxLeft - wall + 5, 4),
     rect(inLeft, inTop, inRight - inLeft, 5),
   );
   sheet.add(
@@ -121,20 +143,23 @@ export function drawLocomotive(sheet: Sheet, facts: BoilerFacts): void {
   );
   sheet.add(
     'thin',
-    ...between(inTop + 10, boxBottom - 8, 5).flatMap((y) => [
-      line([boxLeft, y], [inLeft, y]),
-      line([inRight, y], [left, y]),
-    ]),
+    ...between(inTop + 4, boxBottom - 8, 7)
+      .filter((y) => Math.abs(y - doorY) > 17)
+      .map((y) => line([boxLeft, y], [inLeft + 5, y])),
+    ...between(bottom, boxBottom - 8, 3).map((y) => line([inRight - 5, y], [left, y])),
     ...between(inLeft, inRight, 3).map((x) => line([x, boxTop], [x, inTop])),
   );
-  sheet.point('shell.stays', boxLeft + 14, inTop + 40);
+  sheet.point('shell.stays', (boxLeft + inLeft) / 2 + 3, between(inTop + 4, boxBottom - 8, 7)[0] ?? inTop);
   sheet.point('shell.flue', inLeft + 30, inTop + 3);
   sheet.point('shell.fireside', inRight - 12, inTop + 40);
-  const shown = clamp(Math.round(Math.sqrt(facts.dimensions.tubeCount ?? 14)), 3, 6);
-  for (const y of between(inTop + 4, bottom - wall - 4, shown)) {
-    sheet.add('outline', line([inRight, y - 4], [right, y - 4]), line([inRight, y + 4], [right, y + 4]));
+  for (const y of tubes) {
+    sheet.add(
+      'outline',
+      line([inRight - 5, y - 4], [right, y - 4]),
+      line([inRight - 5, y + 4], [right, y + 4]),
+    );
   }
-  sheet.point('shell.tubes', left + 60, between(inTop + 4, bottom - wall - 4, shown)[0] ?? middle);
+  sheet.point('shell.tubes', left + 60, tubes[0] ?? middle);
   sheet.add('outline', rect(right, top, 62, bottom - top), rect(right + 62, top + 14, 6, bottom - top - 28));
   chimneyAt(sheet, right + 32, top);
   drawWater(sheet, top + 15, [[boxLeft + wall + 4, right - wall]]);
@@ -151,6 +176,7 @@ export function drawLocomotive(sheet: Sheet, facts: BoilerFacts): void {
       checkSide: 1,
       blowdown: [boxLeft, boxBottom - 16],
       fuelX: 66,
+      feedX: 478,
     },
     [inLeft + 8, boxBottom - 10],
   );
@@ -159,29 +185,43 @@ export function drawLocomotive(sheet: Sheet, facts: BoilerFacts): void {
 /** A furnace flue low down and tubes back above it. */
 export function drawReturnFlue(sheet: Sheet, facts: BoilerFacts): void {
   const shell = shellOf(facts);
-  const { left, right, top, bottom, level } = shell;
-  drawShell(sheet, shell);
-  const flueTop = middle + 4;
+  const { left, right, top, bottom } = shell;
+  const height = bottom - top;
+  const level = top + height * 0.24;
   const flueBottom = bottom - 20;
-  const back = right - 44;
+  const flueTop = flueBottom - height * 0.32;
+  const back = right - 52;
+  const tubes = between(level + 6, flueTop, clamp(Math.floor((flueTop - level - 6) / 15), 2, 4));
+  const chamberTop = level + 3;
+  drawShell(sheet, shell, {
+    left: [...tubes.map((y) => [y - 3.5, y + 3.5] as const), [flueTop, flueBottom + 5]],
+  });
   sheet.add(
     'cut',
     rect(left, flueTop, back - left, 5),
-    rect(left, flueBottom, right - left - 38, 5),
-    rect(back, level + 22, 5, flueTop - level - 18),
-    rect(back + 32, level + 22, 5, flueBottom - level - 17),
-    rect(back, level + 18, 37, 5),
+    rect(left, flueBottom, back + 34 - left, 5),
+    ...solidBetween(
+      chamberTop + 5,
+      flueTop + 5,
+      tubes.map((y) => [y - 3.5, y + 3.5] as const),
+    ).map(([from, to]) => rect(back, from, 5, to - from)),
+    rect(back + 29, chamberTop + 5, 5, flueBottom - chamberTop - 5),
+    rect(back, chamberTop, 34, 5),
   );
   sheet.point('shell.flue', left + 120, flueTop + 2);
   sheet.point('shell.fireside', back + 16, flueBottom - 14);
-  for (const y of between(level + 14, flueTop, 3))
-    sheet.add('outline', line([left, y - 3.5], [back, y - 3.5]), line([left, y + 3.5], [back, y + 3.5]));
-  sheet.point('shell.tubes', left + 200, between(level + 14, flueTop, 3)[1] ?? middle);
-  for (const y of [top + 16, top + 26]) {
+  for (const y of tubes)
+    sheet.add(
+      'outline',
+      line([left, y - 3.5], [back + 5, y - 3.5]),
+      line([left, y + 3.5], [back + 5, y + 3.5]),
+    );
+  sheet.point('shell.tubes', left + 200, tubes[1] ?? middle);
+  for (const y of [top + 14, top + 22]) {
     sheet.add('thin', line([left - 5, y], [right + 5, y]));
     for (const x of [left - 5, right + 1]) sheet.add('outline', rect(x, y - 4, 4, 8));
   }
-  sheet.point('shell.stays', right + 3, top + 26);
+  sheet.point('shell.stays', right + 3, top + 22);
   sheet.add(
     'outline',
     line([left, level + 6], [left - 44, level + 6], [left - 44, flueTop - 2], [left, flueTop - 2]),
@@ -207,12 +247,13 @@ export function drawReturnFlue(sheet: Sheet, facts: BoilerFacts): void {
 export function drawCentreFlue(sheet: Sheet, facts: BoilerFacts): void {
   const shell = shellOf(facts);
   const { left, right, top, bottom } = shell;
-  drawShell(sheet, shell);
   const { flueDiameterMm, barrelOutsideDiameterMm } = facts.dimensions;
   const flue =
     clamp((flueDiameterMm ?? barrelOutsideDiameterMm * 0.4) / barrelOutsideDiameterMm, 0.28, 0.52) *
     (bottom - top);
   const [flueTop, flueBottom] = [middle + 8 - flue / 2, middle + 8 + flue / 2];
+  const through = [[flueTop - 5, flueBottom + 5]] as const;
+  drawShell(sheet, shell, { left: through, right: through });
   sheet.add('cut', rect(left, flueTop - 5, right - left, 5), rect(left, flueBottom, right - left, 5));
   sheet.point('shell.flue', left + 150, flueTop - 3);
   sheet.point('shell.fireside', right - 70, flueBottom - 5);
@@ -228,7 +269,7 @@ export function drawCentreFlue(sheet: Sheet, facts: BoilerFacts): void {
   sheet.add('outline', rect(right, flueTop - 8, 52, flue + 16));
   chimneyAt(sheet, right + 26, flueTop - 8, 14);
   drawWater(sheet, top + 22, [[left + 50, right - wall - 4]]);
-  drawFire(sheet, facts, left - 20, middle + 4, 70);
+  drawFire(sheet, facts, left + 12, flueBottom - 12, 76);
   drawFeet(sheet, shell);
   drawLagging(sheet, facts, shell);
   drawFittings(
@@ -239,7 +280,7 @@ export function drawCentreFlue(sheet: Sheet, facts: BoilerFacts): void {
       check: [left + 200, bottom + 14],
       checkSide: 1,
     },
-    [left - 20, middle + 9],
+    [left + 12, flueBottom - 7],
   );
 }
 
@@ -250,7 +291,7 @@ export function drawPot(sheet: Sheet, facts: BoilerFacts): void {
   drawShell(sheet, shell);
   sheet.point('shell.fireside', left + 120, bottom + 2);
   drawWater(sheet, level + 6, [[left + 50, right - wall - 4]]);
-  drawFire(sheet, facts, left + 70, ground - 40, right - left - 140);
+  drawFire(sheet, facts, left + 76, ground - 40, right - left - 200);
   drawFeet(sheet, shell);
   drawLagging(sheet, facts, shell);
   drawFittings(
@@ -261,6 +302,6 @@ export function drawPot(sheet: Sheet, facts: BoilerFacts): void {
       blowdown: [right, bottom - 16],
       blowdownSide: 1,
     },
-    [left + 70, ground - 35],
+    [left + 76, ground - 35],
   );
 }

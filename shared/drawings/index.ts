@@ -32,16 +32,42 @@ interface Placed {
   spot: Spot;
 }
 
-/** One column of balloons, in the order of what they point at, so that their leaders keep clear of one another. */
+/** Whether the leaders of two balloons, one above the other, cross on the way to their spots. */
+function cross(x: number, upper: number, [ax, ay]: Spot, lower: number, [bx, by]: Spot): boolean {
+  const reach = Math.min(Math.abs(ax - x), Math.abs(bx - x));
+  const at = (from: number, sx: number, sy: number): number =>
+    from + ((sy - from) * reach) / Math.abs(sx - x);
+  // Leaders that end on one spot meet there; the margin keeps rounding from calling that a crossing.
+  return at(upper, ax, ay) > at(lower, bx, by) + 0.01;
+}
+
+/** Exchanges whichever two leaders cross until none do; each exchange shortens the leaders, so it comes to an end. */
+function uncrossed(items: readonly Placed[], x: number, yOf: (index: number) => number): Placed[] {
+  const order = [...items];
+  for (let isTangled = true; isTangled;) {
+    isTangled = false;
+    for (let upper = 0; upper < order.length; upper += 1)
+      for (let lower = upper + 1; lower < order.length; lower += 1) {
+        const [a, b] = [order[upper], order[lower]];
+        if (!a || !b || !cross(x, yOf(upper), a.spot, yOf(lower), b.spot)) continue;
+        [order[upper], order[lower]] = [b, a];
+        isTangled = true;
+      }
+  }
+  return order;
+}
+
+/** One column of balloons, so ordered that their leaders do not cross. */
 function column(items: readonly Placed[], x: number): Balloon[] {
   const sorted = items.toSorted((a, b) => a.spot[1] - b.spot[1] || a.criterion.number - b.criterion.number);
   const step = sorted.length < 2 ? 0 : Math.min(48, (columnBottom - columnTop) / (sorted.length - 1));
   const start = (columnTop + columnBottom - step * (sorted.length - 1)) / 2;
-  return sorted.map(({ criterion, spot }, index) => ({
+  const yOf = (index: number): number => Math.round(start + index * step);
+  return uncrossed(sorted, x, yOf).map(({ criterion, spot }, index) => ({
     criterionId: criterion.id,
     number: criterion.number,
     x,
-    y: Math.round(start + index * step),
+    y: yOf(index),
     to: spot,
   }));
 }

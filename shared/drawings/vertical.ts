@@ -1,5 +1,5 @@
 import type { BoilerFacts } from '../boilers/boiler.ts';
-import { between, clamp, line, rect } from './drawing.ts';
+import { between, clamp, line, rect, solidBetween } from './drawing.ts';
 import type { Sheet } from './drawing.ts';
 import { drawFire, drawFittings, drawWater } from './fittings.ts';
 
@@ -25,20 +25,27 @@ export function drawVertical(sheet: Sheet, facts: BoilerFacts): void {
     'cut',
     rect(left, top, wall, height),
     rect(right - wall, top, wall, height),
-    rect(left, top, width, wall),
     rect(boxLeft, boxTop, 5, bottom - boxTop),
     rect(boxRight - 5, boxTop, 5, bottom - boxTop),
-    rect(boxLeft, boxTop, boxWidth, 6),
     rect(left + wall, bottom - 7, boxLeft - left - wall, 7),
     rect(boxRight, bottom - 7, right - wall - boxRight, 7),
   );
   sheet.point('shell.barrel', left + 3, top + height * 0.72);
-  sheet.point('shell.plates', left + width * 0.2, top + 4);
+  sheet.point('shell.plates', left + wall + 6, top + 4);
   sheet.point('shell.joints', boxLeft - 6, bottom - 4);
   sheet.point('shell.waterside', left + wall + 6, top + height * 0.5);
   sheet.point('shell.fireside', boxRight - 12, boxTop + 24);
 
-  const flueWidth = passages(sheet, facts, { width, boxLeft, boxRight, boxTop });
+  const { flueWidth, openings } = passages(sheet, facts, { width, boxLeft, boxRight, boxTop });
+  sheet.add(
+    'cut',
+    ...solidBetween(left + wall, right - wall, openings).map(([from, to]) =>
+      rect(from, top, to - from, wall),
+    ),
+    ...solidBetween(boxLeft + 5, boxRight - 5, openings).map(([from, to]) =>
+      rect(from, boxTop, to - from, 6),
+    ),
+  );
   chimney(sheet, flueWidth);
   drawWater(sheet, level, [
     [left + wall, centre - flueWidth / 2 - 4],
@@ -81,7 +88,7 @@ export function drawVertical(sheet: Sheet, facts: BoilerFacts): void {
     sheet,
     facts,
     {
-      safetyValve: [centre + width * 0.32, top],
+      safetyValve: [centre + width * 0.43, top],
       gauge: [left, top + 26],
       gaugeSide: -1,
       gaugeStem: 0,
@@ -101,6 +108,13 @@ export function drawVertical(sheet: Sheet, facts: BoilerFacts): void {
   );
 }
 
+interface Passages {
+  /** How wide the fire is at the top plate. */
+  flueWidth: number;
+  /** Where it passes through the plates. */
+  openings: readonly (readonly [from: number, to: number])[];
+}
+
 interface Box {
   width: number;
   boxLeft: number;
@@ -108,26 +122,29 @@ interface Box {
   boxTop: number;
 }
 
-/** What leads the fire up through the water; answers how wide it is at the top plate. */
+/** What leads the fire up through the water. */
 function passages(
   sheet: Sheet,
   { dimensions: size, type }: BoilerFacts,
   { width, boxLeft, boxRight, boxTop }: Box,
-): number {
+): Passages {
   if (type === 'vertical-multi-tube') {
     const shown = clamp(Math.round(Math.sqrt(size.tubeCount ?? 12) * 1.3), 3, 7);
     const half = clamp(((boxRight - boxLeft) / (shown + 1)) * 0.24, 3, 7);
     for (const x of between(boxLeft, boxRight, shown)) {
       sheet.add(
         'outline',
-        line([x - half, top], [x - half, boxTop]),
-        line([x + half, top], [x + half, boxTop]),
+        line([x - half, top], [x - half, boxTop + 6]),
+        line([x + half, top], [x + half, boxTop + 6]),
       );
       sheet.add('centre', line([x, top - 6], [x, boxTop + 6]));
     }
     sheet.point('shell.tubes', between(boxLeft, boxRight, shown)[0] ?? centre, top + height * 0.36);
     sheet.point('shell.flue', boxLeft + 3, boxTop + 40);
-    return boxRight - boxLeft - 10;
+    return {
+      flueWidth: boxRight - boxLeft - 10,
+      openings: between(boxLeft, boxRight, shown).map((x) => [x - half, x + half] as const),
+    };
   }
   const flue =
     clamp(
@@ -137,8 +154,8 @@ function passages(
     ) * width;
   sheet.add(
     'cut',
-    rect(centre - flue / 2 - 4, top, 4, boxTop - top),
-    rect(centre + flue / 2, top, 4, boxTop - top),
+    rect(centre - flue / 2 - 4, top, 4, boxTop + 6 - top),
+    rect(centre + flue / 2, top, 4, boxTop + 6 - top),
   );
   sheet.point('shell.flue', centre - flue / 2 - 2, (top + boxTop) / 2 + 10);
   if (type === 'vertical-cross-tube') {
@@ -152,11 +169,11 @@ function passages(
     }
     sheet.point('shell.tubes', centre + 14, boxTop + 52);
   }
-  return flue;
+  return { flueWidth: flue, openings: [[centre - flue / 2 - 4, centre + flue / 2 + 4]] };
 }
 
 function chimney(sheet: Sheet, flueWidth: number): void {
-  const foot = flueWidth / 2 + 8;
+  const foot = flueWidth / 2 + 2;
   const stack = Math.min(22, foot);
   sheet.add(
     'outline',

@@ -31,6 +31,31 @@ describe('the general arrangement of any boiler', () => {
     );
   });
 
+  test('has no two leaders that cross', () => {
+    type Point = readonly [number, number];
+    // How far c lies from the line through a and b, to one hand or the other.
+    const off = ([ax, ay]: Point, [bx, by]: Point, [cx, cy]: Point) =>
+      ((bx - ax) * (cy - ay) - (by - ay) * (cx - ax)) / Math.hypot(bx - ax, by - ay);
+    // By more than half a unit, so that leaders that meet on one spot do not count.
+    const parts = (a: Point, b: Point, c: Point, d: Point) => {
+      const [one, other] = [off(a, b, c), off(a, b, d)];
+      return one * other < 0 && Math.min(Math.abs(one), Math.abs(other)) > 0.5;
+    };
+    fc.assert(
+      fc.property(anyFacts, (facts) => {
+        const leaders = drawingOf(facts).balloons.flatMap(({ x, y, to }) =>
+          to === null ? [] : [{ from: [x, y] as const, to }],
+        );
+        for (const [index, one] of leaders.entries())
+          for (const other of leaders.slice(index + 1))
+            expect(
+              parts(one.from, one.to, other.from, other.to) && parts(other.from, other.to, one.from, one.to),
+            ).toBe(false);
+      }),
+      { numRuns: 150 },
+    );
+  });
+
   test('is drawn in proportion: a longer barrel is a slimmer one, and more tubes are more lines', () => {
     const of = (change: Partial<typeof goodFacts.dimensions>) =>
       JSON.stringify(drawingOf({ ...goodFacts, dimensions: { ...goodFacts.dimensions, ...change } }).strokes);

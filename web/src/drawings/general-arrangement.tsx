@@ -41,7 +41,7 @@ export function GeneralArrangement({ facts, rubricVersion, label, gradeOf, hrefO
         viewBox={`0 0 ${String(width)} ${String(height)}`}
         role={hrefOf ? 'group' : 'img'}
         aria-label={label}
-        className="mx-auto w-full max-w-4xl min-w-[40rem]"
+        className="mx-auto w-full max-w-4xl min-w-[42rem]"
       >
         <defs>
           <pattern
