@@ -4,7 +4,6 @@ import type { ReportReplies } from '#shared/surveys/replies.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { formatDay } from '#web/lib/format.ts';
 import { Button } from '#web/ui/button.tsx';
-import { Disclosure } from '#web/ui/disclosure.tsx';
 import { Field } from '#web/ui/field.tsx';
 import { Notice } from '#web/ui/notes.tsx';
 import { useReplyToFinding } from './queries.ts';
@@ -31,17 +30,12 @@ export function FindingReply({ reportId, version, criterion, replies }: Props) {
       </div>
     );
   return replies.viewer.canReply ? (
-    <div className="print:hidden">
-      <Disclosure
-        summary={
-          <>
-            Answer this<span className="sr-only">: {criterion.title}</span>
-          </>
-        }
-      >
-        <ReplyForm reportId={reportId} criterionId={criterion.id} />
-      </Disclosure>
-    </div>
+    <details className="print:hidden">
+      <summary className="min-h-11 py-2.5 text-sm leading-6 font-medium marker:text-copper">
+        Answer this<span className="sr-only">: {criterion.title}</span>
+      </summary>
+      <ReplyForm reportId={reportId} criterionId={criterion.id} />
+    </details>
   ) : null;
 }
 
