@@ -2,7 +2,7 @@ import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { Listing } from '#shared/listings/contract.ts';
 import type { SurveyOrder } from '#shared/survey-orders/contract.ts';
 import type { CheckedReport, Report, Survey } from '#shared/surveys/contract.ts';
-import type { ReportVersions } from '#shared/surveys/corrections.ts';
+import type { ReportVersions } from '#shared/surveys/corrections-contract.ts';
 import { scoreSurvey } from '#shared/surveys/score.ts';
 import { daysMs } from '#shared/time.ts';
 import {

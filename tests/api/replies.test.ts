@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { Report, Survey } from '#shared/surveys/contract.ts';
-import type { ReportReplies } from '#shared/surveys/replies.ts';
+import type { ReportReplies } from '#shared/surveys/replies-contract.ts';
 import { addDays, dayOf } from '#shared/time.ts';
 import { file, givenExamination, givenRecorded, saveRecord } from '#tests/support/examinations.ts';
 import type { Examination } from '#tests/support/examinations.ts';

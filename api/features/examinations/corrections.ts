@@ -1,5 +1,5 @@
 import { Problem } from '#shared/problem.ts';
-import type { ReportVersions } from '#shared/surveys/corrections.ts';
+import type { ReportVersions } from '#shared/surveys/corrections-contract.ts';
 import { mayCorrectReport } from '#shared/survey-orders/machine.ts';
 import { inTransaction, requireActor } from '../../ctx.ts';
 import type { Ctx } from '../../ctx.ts';

@@ -1,6 +1,6 @@
 import { Router } from 'express';
 import * as contract from '#shared/surveys/contract.ts';
-import * as correcting from '#shared/surveys/corrections.ts';
+import * as correcting from '#shared/surveys/corrections-contract.ts';
 import { route } from '../../http/route.ts';
 import * as corrections from './corrections.ts';
 import * as service from './service.ts';

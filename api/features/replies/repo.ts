@@ -1,6 +1,6 @@
 import { asc, inArray } from 'drizzle-orm';
 import { randomUUID } from 'node:crypto';
-import type { Repair } from '#shared/surveys/replies.ts';
+import type { Repair } from '#shared/surveys/replies-contract.ts';
 import type { Day, Instant } from '#shared/time.ts';
 import type { Db } from '../../db/client.ts';
 import { reportRepairs, reportReplies } from '../../db/schema/index.ts';

@@ -1,5 +1,5 @@
 import { Router } from 'express';
-import * as contract from '#shared/surveys/replies.ts';
+import * as contract from '#shared/surveys/replies-contract.ts';
 import { route } from '../../http/route.ts';
 import * as service from './service.ts';
 

@@ -1,12 +1,12 @@
 import type { BodyOf } from '#shared/endpoint.ts';
 import { invalidField, Problem } from '#shared/problem.ts';
 import { canonicalJson } from '#shared/surveys/canonical.ts';
-import { mostRepairs } from '#shared/surveys/replies.ts';
+import { mostRepairs } from '#shared/surveys/replies-contract.ts';
 import type {
   listRepair as repairContract,
   replyToFinding as replyContract,
-} from '#shared/surveys/replies.ts';
-import type { Reply, ReportReplies } from '#shared/surveys/replies.ts';
+} from '#shared/surveys/replies-contract.ts';
+import type { Reply, ReportReplies } from '#shared/surveys/replies-contract.ts';
 import { addDays, dayOf } from '#shared/time.ts';
 import { inTransaction, requireActor } from '../../ctx.ts';
 import type { Ctx } from '../../ctx.ts';

@@ -1,6 +1,6 @@
 import { useState } from 'react';
-import { newReply } from '#shared/surveys/replies.ts';
-import type { ReportReplies } from '#shared/surveys/replies.ts';
+import { newReply } from '#shared/surveys/replies-contract.ts';
+import type { ReportReplies } from '#shared/surveys/replies-contract.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { formatDay } from '#web/lib/format.ts';
 import { Button } from '#web/ui/button.tsx';

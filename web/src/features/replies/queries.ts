@@ -1,6 +1,6 @@
 import { queryOptions, useMutation } from '@tanstack/react-query';
 import type { BodyOf } from '#shared/endpoint.ts';
-import * as contract from '#shared/surveys/replies.ts';
+import * as contract from '#shared/surveys/replies-contract.ts';
 import { call } from '#web/lib/api.ts';
 
 export const replyQueries = {

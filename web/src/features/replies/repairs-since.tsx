@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import { Problem } from '#shared/problem.ts';
-import { mostRepairs, newRepair } from '#shared/surveys/replies.ts';
-import type { ReportReplies } from '#shared/surveys/replies.ts';
+import { mostRepairs, newRepair } from '#shared/surveys/replies-contract.ts';
+import type { ReportReplies } from '#shared/surveys/replies-contract.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { formatDay } from '#web/lib/format.ts';
 import { Button } from '#web/ui/button.tsx';

@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
-import { correctionReason } from '#shared/surveys/corrections.ts';
-import type { ReportVersions } from '#shared/surveys/corrections.ts';
+import { correctionReason } from '#shared/surveys/corrections-contract.ts';
+import type { ReportVersions } from '#shared/surveys/corrections-contract.ts';
 import { sitePaths } from '#shared/site-paths.ts';
 import { messageOf } from '#web/lib/form-problem.ts';
 import { Button, ButtonLink } from '#web/ui/button.tsx';

@@ -1,6 +1,6 @@
 import { queryOptions, useMutation } from '@tanstack/react-query';
 import { checkReport, getReport, getReportAgreements } from '#shared/surveys/contract.ts';
-import { getReportVersions, startCorrection } from '#shared/surveys/corrections.ts';
+import { getReportVersions, startCorrection } from '#shared/surveys/corrections-contract.ts';
 import { surveyQueries } from '#web/features/surveys/queries.ts';
 import { call } from '#web/lib/api.ts';
 

@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import { isOldReport, oldAfterMonths } from '#shared/surveys/age.ts';
-import type { ReportVersions } from '#shared/surveys/corrections.ts';
+import type { ReportVersions } from '#shared/surveys/corrections-contract.ts';
 import { sitePaths } from '#shared/site-paths.ts';
 import { formatDay } from '#web/lib/format.ts';
 import { Notice } from '#web/ui/notes.tsx';

@@ -1,5 +1,5 @@
 import { useMutation } from '@tanstack/react-query';
-import { giveUpCorrection } from '#shared/surveys/corrections.ts';
+import { giveUpCorrection } from '#shared/surveys/corrections-contract.ts';
 import { call } from '#web/lib/api.ts';
 
 export function useGiveUpCorrection(orderId: string) {
