@@ -1,3 +1,4 @@
+import type { Page } from '@playwright/test';
 import { expect, expectAccessible, signInAs, test } from './fixtures.ts';
 
 const open = [
@@ -32,15 +33,29 @@ for (const colorScheme of ['light', 'dark'] as const) {
   });
 }
 
+/** Nothing of the page lies past the edge of a phone. */
+async function expectNoSidewaysScroll(page: Page): Promise<void> {
+  const before = page.viewportSize();
+  await page.setViewportSize({ width: 360, height: 760 });
+  await expect
+    .poll(() =>
+      page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth),
+    )
+    .toBeLessThanOrEqual(0);
+  if (before) await page.setViewportSize(before);
+}
+
 test('a boiler and its report open to everyone, with the address of neither', async ({ page }) => {
   await page.goto('/boilers?verdict=repair-before-steaming');
   await page.getByRole('link', { name: 'Twelve-tube vertical in copper' }).click();
   await expect(page.getByRole('heading', { level: 1 })).toHaveText(/Twelve-tube/);
   await expect(page.getByText('Weavers Row')).toHaveCount(0);
   await expectAccessible(page);
+  await expectNoSidewaysScroll(page);
   await page.getByRole('link', { name: /Repair before steaming/ }).click();
   await expect(page.getByText('This is not a certificate')).toBeVisible();
   await expectAccessible(page);
+  await expectNoSidewaysScroll(page);
 });
 
 test('each role finds work on its desk at first sign-in', async ({ newPerson }) => {

@@ -113,7 +113,7 @@ export function Component() {
           </Caution>
         </div>
       </div>
-      <div className="mt-12 grid gap-x-12 lg:grid-cols-[minmax(0,7fr)_minmax(0,5fr)]">
+      <div className="mt-12 grid grid-cols-1 gap-x-12 lg:grid-cols-[minmax(0,7fr)_minmax(0,5fr)]">
         <div>
           <Section title="Survey reports">
             <ReportsList reports={listing.reports} />

@@ -84,7 +84,7 @@ function Examination({ survey }: { survey: Survey }) {
       <h1 ref={heading} tabIndex={-1} className="mb-3 text-2xl outline-hidden">
         {title}
       </h1>
-      <div className="grid gap-5">
+      <div className="grid grid-cols-1 gap-5">
         <SaveTrouble draft={draft} orderId={survey.orderId} />
         {step === undefined ? (
           <>
